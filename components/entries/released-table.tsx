@@ -1,0 +1,57 @@
+import Link from 'next/link';
+import { Quantity } from '@/components/ui/quantity';
+import { TableScroll } from '@/components/ui/table-scroll';
+import type { ReleasedSubstance } from '@/lib/check/check';
+
+type Shown = ReleasedSubstance['limits'][number];
+
+function Limits({ limits }: { limits: Shown[] }) {
+  if (limits.length === 0) return <span className="text-quiet">no numeric limit recorded</span>;
+  return (
+    <ul>
+      {limits.map((limit, i) => (
+        <li key={i}>
+          {limit.authority} {limit.basis} <Quantity kind="concentration" value={limit.value} unit={limit.unit} />
+          {limit.as && ` as ${limit.as}`}
+          {limit.provenance !== 'published' && <small className="label"> ({limit.provenance}: check it)</small>}
+        </li>
+      ))}
+    </ul>
+  );
+}
+
+/** What is released, each against its limits in force. Sources of a limit stand on the substance's own page. */
+export function ReleasedTable({ releases }: { releases: ReleasedSubstance[] }) {
+  if (releases.length === 0) return <p>No released substance is recorded.</p>;
+  return (
+    <TableScroll label="Released substances and their limits">
+      <table className="mt-2 w-full min-w-[34rem] border-collapse">
+        <thead>
+          <tr className="label border-b-2 border-ink text-left">
+            {['Substance', 'CAS', 'Cancer', 'Limits'].map((head) => (
+              <th key={head} scope="col" className="p-2">
+                {head}
+              </th>
+            ))}
+          </tr>
+        </thead>
+        <tbody>
+          {releases.map((each) => (
+            <tr key={each.substance} className="border-b border-rule align-top">
+              <th scope="row" className="p-2 text-left">
+                <Link href={`/substances/${each.substance}`} prefetch={false}>
+                  {each.name}
+                </Link>
+              </th>
+              <td className="figure p-2">{each.cas ?? '—'}</td>
+              <td className="p-2">{each.carcinogen ?? '—'}</td>
+              <td className="p-2">
+                <Limits limits={each.limits} />
+              </td>
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </TableScroll>
+  );
+}
