@@ -2,5 +2,5 @@
 export async function register() {
   if (process.env.NEXT_RUNTIME !== 'nodejs' || process.env.NEXT_PHASE === 'phase-production-build') return;
   const { watchLibrary } = await import('@/lib/search/live-library');
-  watchLibrary();
+  await watchLibrary();
 }

@@ -43,12 +43,17 @@ export async function lookOnce(): Promise<boolean> {
   return true;
 }
 
-/** Watches the version row until the process ends. A database that is away is said once a look and tried again. */
-export function watchLibrary(): void {
+/**
+ * Begins to answer and to watch: loads the library, drops pages stored under an earlier run (the library may have changed while no
+ * process ran), then looks at the version row until the process ends. A database that is away is said and tried again.
+ */
+export async function watchLibrary(): Promise<void> {
   if (holder.fumeloreWatch) return;
+  await liveLibrary().catch((error: Error) => log.warn({ reason: error.message }, 'library could not be loaded yet'));
+  await expireAll();
   const look = async () => {
     await lookOnce().catch((error: Error) => log.warn({ reason: error.message }, 'library could not be looked at'));
     holder.fumeloreWatch = setTimeout(look, LOOK_EVERY_MS).unref();
   };
-  holder.fumeloreWatch = setTimeout(look, 0).unref();
+  holder.fumeloreWatch = setTimeout(look, LOOK_EVERY_MS).unref();
 }
