@@ -1,0 +1,37 @@
+import { isStopping, stopAll } from './children.mjs';
+import { lineFor, Stopped } from './trouble.mjs';
+
+const SIGNALS = /** @type {NodeJS.Signals[]} */ (['SIGINT', 'SIGTERM', 'SIGHUP']);
+
+/** Rejects at the first signal. Npm passes on what the terminal sent already, so later ones say nothing new. */
+const stopAsked = () =>
+  new Promise((_, reject) => {
+    let asked = false;
+    const ask = () => {
+      if (asked) return;
+      asked = true;
+      if (!isStopping()) console.log('Stopping.');
+      reject(new Stopped());
+    };
+    for (const name of SIGNALS) process.on(name, ask);
+  });
+
+/**
+ * Runs a command to its end: its code when it has one, 1 and one line for any fault, 0 when it was asked to stop; and always with
+ * everything it started stopped first.
+ * @param {() => Promise<number | void>} work
+ */
+export async function command(work) {
+  for (const stream of [process.stdout, process.stderr]) stream.on('error', () => undefined);
+  let code = 0;
+  try {
+    code = (await Promise.race([work(), stopAsked()])) ?? 0;
+  } catch (error) {
+    if (!(error instanceof Stopped)) {
+      console.log(lineFor(error));
+      code = 1;
+    }
+  }
+  await stopAll();
+  process.exit(code);
+}
