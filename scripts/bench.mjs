@@ -1,42 +1,62 @@
+import { join } from 'node:path';
 import { register } from 'tsx/esm/api';
+import { command } from './lib/command.mjs';
+import { ensureMariadb, openPrivate } from './lib/database.mjs';
+import { prepare, requireNode } from './lib/prepare.mjs';
+import { DATA } from './lib/root.mjs';
+import { steps } from './lib/steps.mjs';
 
 /*
- * What is fast, measured against something known, in one run on one machine: the ratios travel, the milliseconds do not.
- *   npm run bench                                    search against MiniSearch as it comes, and success on judged questions
- *   DATABASE_URL=… npm run bench                     also against MariaDB full text
- *   BENCH_BASE_URL=http://127.0.0.1:3000 npm run bench   also a running server against its own trivial answers
+ * `npm run bench`: what is fast, measured against something known, in one run on one machine: the ratios travel, the milliseconds do
+ * not. The database is one of its own and is thrown away. With BENCH_BASE_URL=http://127.0.0.1:3000 a running website is measured too.
  */
-register();
-const { searchSpeed } = await import('./bench/search-speed.mjs');
-const { searchSuccess } = await import('./bench/search-success.mjs');
-const { databaseSearch } = await import('./bench/database-search.mjs');
-const { serverSpeed } = await import('./bench/load.mjs');
-
 const SIZES = [100, 1_000, 10_000];
-const { DATABASE_URL, BENCH_BASE_URL } = process.env;
-const ms = (value) => `${value.toPrecision(2)} ms`;
-const times = (value) => `${value.toPrecision(2)}x`;
+const ms = (/** @type {number} */ value) => `${Number(value.toPrecision(2))} ms`;
+const times = (/** @type {number} */ value) => `${Number(value.toPrecision(2))}x`;
 
-console.log('Search against MiniSearch as it comes, the same generated entries, median a question:');
-for (const { size, ours, plain, ratio, built } of await searchSpeed(SIZES))
-  console.log(
-    `  ${size} entries: ${ms(ours)} against ${ms(plain)} = ${times(ratio)}   (built in ${Math.round(built)} ms)`,
-  );
+async function searchAgainstMiniSearch() {
+  const { searchSpeed } = await import('./bench/search-speed.mjs');
+  console.log('Search against MiniSearch as it comes, the same generated entries, median a question:');
+  for (const { size, ours, plain, ratio, built } of await searchSpeed(SIZES))
+    console.log(`  ${size} entries: ${ms(ours)} / ${ms(plain)} = ${times(ratio)}   (built in ${Math.round(built)} ms)`);
+}
 
-console.log('Success on judged questions, real content:');
-for (const { name, documents, questions, at1, at3 } of await searchSuccess('tests/data/search-queries.tsv'))
-  console.log(`  ${name}: first ${at1} %, first three ${at3} %   (${questions} questions, ${documents} documents)`);
-
-if (DATABASE_URL) {
+async function searchAgainstDatabase() {
+  const { place } = await prepare(join(DATA, 'bench'), 'npm run bench');
+  const step = steps(2);
+  await ensureMariadb(place, step);
+  const { migrateUrl } = await openPrivate(place, 'fumelore_bench', step, { forTests: true });
+  const { databaseSearch } = await import('./bench/database-search.mjs');
   console.log('Search against MariaDB full text, the same generated entries, median a question:');
-  for (const { size, ours, database, ratio } of await databaseSearch(DATABASE_URL, SIZES))
-    console.log(`  ${size} entries: ${ms(ours)} against ${ms(database)} = ${times(ratio)}`);
-} else console.log('MariaDB full text: not measured, DATABASE_URL is not set.');
+  for (const { size, ours, database, ratio } of await databaseSearch(migrateUrl, SIZES))
+    console.log(`  ${size} entries: ${ms(ours)} / ${ms(database)} = ${times(ratio)}`);
+}
 
-if (BENCH_BASE_URL) {
-  console.log('A running server, requests a second:');
-  for (const { address, trivial, ours, rival, ratio } of await serverSpeed(BENCH_BASE_URL))
+async function successOfSearch() {
+  const { searchSuccess } = await import('./bench/search-success.mjs');
+  console.log('Success on judged questions, real content:');
+  for (const { name, documents, questions, left, at1, at3 } of await searchSuccess('tests/data/search-queries.tsv'))
     console.log(
-      `  ${address}: ${Math.round(ours.perSecond)} (median ${ms(ours.median)}) against ${trivial} ${Math.round(rival.perSecond)} = ${times(ratio)}`,
+      `  ${name}: first ${at1} %, first three ${at3} %   (${questions} questions, ${left} without a page yet, ${documents} documents)`,
     );
-} else console.log('A running server: not measured, BENCH_BASE_URL is not set.');
+}
+
+async function runningWebsite() {
+  const base = process.env.BENCH_BASE_URL;
+  if (!base) return console.log('A running website: not measured, BENCH_BASE_URL is not set.');
+  const { serverSpeed } = await import('./bench/load.mjs');
+  console.log('A running website against its own trivial answers, requests a second:');
+  for (const { address, trivial, ours, rival, ratio } of await serverSpeed(base))
+    console.log(
+      `  ${address}: ${Math.round(ours.perSecond)} (median ${ms(ours.median)}) / ${trivial} ${Math.round(rival.perSecond)} (median ${ms(rival.median)}) = ${times(ratio)} of its time`,
+    );
+}
+
+await command(async () => {
+  requireNode();
+  register();
+  await searchAgainstMiniSearch();
+  await searchAgainstDatabase();
+  await successOfSearch();
+  await runningWebsite();
+});

@@ -1,24 +1,52 @@
-import { spawnSync } from 'node:child_process';
-import { existsSync, mkdtempSync, readFileSync } from 'node:fs';
+import { mkdtempSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { command } from './lib/command.mjs';
+import { ensurePackages } from './lib/packages.mjs';
+import { ensureMariadb, openPrivate } from './lib/database.mjs';
+import { prepare, requireNode } from './lib/prepare.mjs';
+import { TEST_DATA } from './lib/root.mjs';
+import { runBrowser, runVitest } from './lib/runners.mjs';
+import { steps } from './lib/steps.mjs';
+import { sum } from './lib/tally.mjs';
+import { ensurePrograms } from './lib/debian.mjs';
 
-/** Installs what is missing, runs every test, and closes with one line: `N passed, N failed`. */
-const run = (command, args) => spawnSync(command, args, { stdio: 'inherit' }).status ?? 1;
+/**
+ * `npm test`: every test, against a database and a built website of its own, thrown away each time; closes with one line,
+ * `N passed, N failed`. With arguments (`npm test -- tests/lib/env.test.ts`) only vitest runs, and takes them.
+ */
+const args = process.argv.slice(2);
 
-if (!existsSync('node_modules/vitest') && run('npm', ['ci', '--no-audit', '--no-fund']) !== 0) {
-  console.log('packages could not be installed');
-  process.exit(1);
+/** The tests know nothing of the settings a person has for the website. */
+function forgetSettings() {
+  for (const name of ['DATABASE_URL', 'MIGRATION_DATABASE_URL', 'BASE_URL', 'PORT']) process.env[name] = '';
+  Object.assign(process.env, {
+    NEXT_DIST_DIR: '.next-test',
+    PAGE_CACHE: '',
+    FUMELORE_DEMO: 'on',
+    LOG_LEVEL: 'info',
+    DATABASE_POOL_MAX: '10',
+  });
 }
-const report = join(mkdtempSync(join(tmpdir(), 'fumelore-test-')), 'vitest.json');
-const status = run('node', [
-  'node_modules/vitest/vitest.mjs',
-  'run',
-  '--reporter=default',
-  '--reporter=json',
-  `--outputFile=${report}`,
-  ...process.argv.slice(2),
-]);
-const result = existsSync(report) ? JSON.parse(readFileSync(report, 'utf8')) : { numPassedTests: 0, numFailedTests: 1 };
-console.log(`${result.numPassedTests} passed, ${result.numFailedTests} failed`);
-process.exitCode = status === 0 && result.numPassedTests > 0 ? 0 : 1;
+
+await command(async () => {
+  requireNode();
+  forgetSettings();
+  const { place } = await prepare(TEST_DATA, 'npm test');
+  const all = args.length === 0;
+  const step = steps(all ? 8 : 3);
+  await ensurePackages(place.log('npm'), step);
+  await ensureMariadb(place, step);
+  const database = await openPrivate(place, 'fumelore_browser', step, { forTests: true });
+  const reports = mkdtempSync(join(tmpdir(), 'fumelore-reports-'));
+  const tallies = [await runVitest(place, database, reports, args)];
+  if (all) {
+    const doing = (/** @type {string} */ what) => step.doing('browser', what);
+    await ensurePrograms('Chromium', ['chromium'], ['chromium'], place.log('apt'), doing);
+    step.done('browser', 'ready');
+    tallies.push(await runBrowser(place, database, reports, step));
+  }
+  const { passed, failed } = sum(tallies);
+  console.log(`${passed} passed, ${failed} failed`);
+  return failed === 0 ? 0 : 1;
+});

@@ -33,14 +33,19 @@ const K = 1.2;
 const B = 0.7;
 const D = 0.5;
 
+/** How often a term stands in one field, by document number. */
+type Frequencies = ReadonlyMap<number, number>;
+
 /** The documents that hold one term and what each earns by it, all fields together; the two arrays run side by side. */
 export type Postings = { documents: Int32Array; scores: Float32Array };
 
 /**
  * MiniSearch 7.2.0 with its own indexing and statistics, and a leaner way to score. `search()` builds a result object with a list
  * of terms and fields for every document that matches; at 10,000 documents that is nearly all of its time, and a page shows twenty.
- * Here a term's postings are weighed once by the same BM25+ formula into two flat arrays, kept while the index lives (it is
- * replaced whole, never edited), and ranking adds numbers. Documents are numbered in the order added, from 0.
+ * Here a term's postings are weighed once by its BM25+ formula into two flat arrays, kept while the index lives (it is replaced
+ * whole, never edited), and ranking adds numbers. One thing differs: a term is as rare as the documents that hold it in any field
+ * are few (BM25F: Robertson, Zaragoza, Taylor 2004), where MiniSearch counts field by field, so that a word half the texts hold and
+ * two titles, such as fume, would count as rare. Documents are numbered in the order added, from 0.
  */
 export class LeanIndex extends MiniSearch<SearchDocument> {
   readonly vocabulary: Vocabulary;
@@ -75,18 +80,19 @@ export class LeanIndex extends MiniSearch<SearchDocument> {
     if (kept) return kept;
     const byField = this._index.get(term);
     if (!byField) return undefined;
+    const holders = new Set(FIELDS.flatMap((field) => [...(byField.get(this._fieldIds[field]!)?.keys() ?? [])]));
+    const rarity = Math.log(1 + (this._documentCount - holders.size + 0.5) / (holders.size + 0.5));
     const earned = new Map<number, number>();
-    for (const field of FIELDS) this.#weigh(field, byField.get(this._fieldIds[field]!), earned);
+    for (const field of FIELDS) this.#weigh(field, byField.get(this._fieldIds[field]!), rarity, earned);
     const made = { documents: Int32Array.from(earned.keys()), scores: Float32Array.from(earned.values()) };
     this.#postings.set(term, made);
     return made;
   }
 
-  #weigh(field: FieldName, frequencies: ReadonlyMap<number, number> | undefined, earned: Map<number, number>): void {
+  #weigh(field: FieldName, frequencies: Frequencies | undefined, rarity: number, earned: Map<number, number>): void {
     if (!frequencies) return;
     const id = this._fieldIds[field]!;
     const mean = this._avgFieldLength[id] || 1;
-    const rarity = Math.log(1 + (this._documentCount - frequencies.size + 0.5) / (frequencies.size + 0.5));
     for (const [document, frequency] of frequencies) {
       const length = this._fieldLength.get(document)?.[id] ?? mean;
       const saturated = (frequency * (K + 1)) / (frequency + K * (1 - B + (B * length) / mean));

@@ -3,7 +3,7 @@ export const MAX_QUERY_CHARACTERS = 200;
 export const MAX_QUERY_TERMS = 10;
 export const MIN_PREFIX_LETTERS = 3;
 /** A longer word is looked up as it is: no beginnings, tolerance or parting. */
-export const MAX_WORD_LETTERS = 40;
+export const MAX_WORD_LETTERS = 60;
 export const MAX_HITS = 100;
 export const DEFAULT_HITS = 20;
 

@@ -35,17 +35,16 @@ function addName(names: NameDictionary, name: string, document: number, weight: 
   }
 }
 
-/** What a title is compared as when it is the whole question: its telling words in one spelling, singular, joined. */
-export const titleKey = (words: readonly Word[]): string =>
-  words
-    .filter((word) => !word.stop)
-    .map((word) => singular(word.surface))
-    .join('');
+/** What a title is compared as when it is the whole question: its words in one spelling, singular, joined. */
+const compact = (words: readonly Word[]): string => words.map((word) => singular(word.surface)).join('');
 
-/** Enters a document's title and slug under its number in the index. */
+/** The same of a question: its telling words only. */
+export const titleKey = (words: readonly Word[]): string => compact(words.filter((word) => !word.stop));
+
+/** Enters a document's title and slug under its number in the index, with stop words and without. */
 export function addTitle(titles: TitleDictionary, { title, slug }: SearchDocument, number: number): void {
-  for (const key of new Set([title, slug].map((name) => titleKey(wordsOf(name)))))
-    titles.set(key, [...(titles.get(key) ?? []), number]);
+  const keys = [title, slug].map((name) => wordsOf(name)).flatMap((words) => [compact(words), titleKey(words)]);
+  for (const key of new Set(keys)) titles.set(key, [...(titles.get(key) ?? []), number]);
 }
 
 /** Enters a document's title, other names and codes under its number in the index. */

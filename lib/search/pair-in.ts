@@ -48,7 +48,7 @@ export function namesOfPair({ pages }: SearchIndex, { materials, process }: Foun
  * @example pairIn('can I laser cut PVC?', index) // { materials: ['pvc'], process: 'laser-cutting', title: 'PVC: Laser cutting' }
  */
 export function pairIn(query: string, index: SearchIndex): PairNames | undefined {
-  const reading = readQuestion(index.lean, query);
+  const reading = readQuestion(index, query);
   const pair = pairAmong(index, reading, nameSpans(index.names, reading.sequence));
   return pair && namesOfPair(index, pair);
 }

@@ -2,9 +2,12 @@ import type { SearchIndex } from './build-index';
 import { nameSpans, titleKey, type NameSpan } from './names';
 import type { FoundPair } from './pair-in';
 import type { Reading } from './reading';
+import { isCasNumber } from './tokens';
 
 /** What a whole name found in the question adds for each of its telling words; about what a title word earns by itself. */
 const NAME_BONUS = 10;
+/** A CAS number is nobody else's: it settles the question, whatever stands around it. */
+const CAS_BONUS = 80;
 /** A name found only after mending a misspelt word counts less. */
 const MENDED = 0.6;
 
@@ -40,8 +43,9 @@ function addBonus(reading: Reading, span: NameSpan, scores: Float64Array, words:
   const told = reading.sequence.slice(span.from, span.to).filter((word) => !word.stop);
   const mended = told.some((word) => word.mended === 'tolerated');
   const places = told.reduce((bits, word) => bits | (1 << word.place), 0);
+  const bonus = isCasNumber(told[0]?.term ?? '') ? CAS_BONUS : NAME_BONUS * told.length * (mended ? MENDED : 1);
   for (const { document, weight } of span.named) {
-    scores[document]! += NAME_BONUS * told.length * weight * (mended ? MENDED : 1);
+    scores[document]! += bonus * weight;
     words[document]! |= places;
   }
 }

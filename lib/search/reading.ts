@@ -1,3 +1,4 @@
+import type { SearchIndex } from './build-index';
 import { MAX_QUERY_CHARACTERS, MAX_QUERY_TERMS } from './limits';
 import type { LeanIndex } from './lean-index';
 import { stem } from './stem';
@@ -12,7 +13,10 @@ export type Wanted = { term: string; weight: number; words: number };
  * the place of the telling word it came from and whether it was mended; `wanted` the terms to look up, `words` being a bit per place.
  */
 export type Reading = { written: string[]; sequence: Read[]; wanted: Wanted[] };
+/** A word of the question as it is taken to be meant. */
 export type Read = Word & { place: number; mended: 'no' | 'split' | 'tolerated' };
+
+type Known = Pick<SearchIndex, 'lean' | 'names'>;
 
 const LAST_WORD_BEGINNING = 0.5;
 const SPLIT = 0.9;
@@ -30,27 +34,41 @@ function knownTerm(lean: LeanIndex, { term, surface }: Word): string | undefined
   return [term, ...singulars.map(stem)].find((one) => lean.knows(one));
 }
 
-/** One telling word: itself when the index knows it, else the words it may stand for. */
-function readWord(lean: LeanIndex, word: Word, place: number, isLast: boolean): { read: Read[]; wanted: Wanted[] } {
+type ReadWord = { read: Read[]; wanted: Wanted[] };
+
+const want = (word: Read, term: string, weight: number): Wanted => ({ term, weight, words: 1 << word.place });
+
+/** The words that a word written without spaces is made of, when it is. */
+const partsOf = ({ vocabulary }: LeanIndex, word: Read): Read[] =>
+  (vocabulary.split(word.surface) ?? []).map((part) => ({ ...word, ...wordOf(part), mended: 'split' }));
+
+const wantParts = (parts: Read[]): Wanted[] =>
+  parts.filter((part) => !part.stop).map((part) => want(part, part.term, SPLIT));
+
+/**
+ * A word the index knows is itself; the last one may also be the beginning of a longer word. A name that some text happens to hold
+ * without its space (`flame-polishing`) counts by its parts too.
+ */
+function readKnown({ lean, names }: Known, word: Read, isLast: boolean): ReadWord {
   const { vocabulary } = lean;
-  const words = 1 << place;
-  const want = (term: string, weight: number): Wanted => ({ term, weight, words });
-  const term = knownTerm(lean, word);
-  const known = term !== undefined;
-  const beginnings = isLast || !known ? vocabulary.beginning(word.surface) : [];
-  const begun = beginnings.map(({ term, near }) => want(term, near * (known ? LAST_WORD_BEGINNING : 1)));
-  const plain: Read = { ...word, place, mended: 'no' };
-  if (known)
-    return { read: [{ ...plain, term }], wanted: [want(term, 1), ...begun.filter((one) => one.term !== term)] };
+  const longer = isLast ? vocabulary.beginning(word.surface).filter(({ term }) => term !== word.term) : [];
+  const begun = longer.map(({ term, near }) => want(word, term, near * LAST_WORD_BEGINNING));
+  const isCompound = names.has(word.term) && !vocabulary.isHead(word.surface);
+  const parts = isCompound ? wantParts(partsOf(lean, word)) : [];
+  return { read: [word], wanted: [want(word, word.term, 1), ...begun, ...parts] };
+}
+
+/** A word the index does not know: a whole name written as one, the words it joins, or what it is near to or begins. */
+function readUnknown({ lean, names }: Known, word: Read): ReadWord {
+  const { vocabulary } = lean;
   const near = vocabulary.tolerated(word.written);
-  const tolerated = near.map((candidate) => want(candidate.term, candidate.near));
-  const parts = vocabulary.split(word.surface)?.map((part): Read => ({ ...wordOf(part), place, mended: 'split' }));
-  if (parts) {
-    const told = parts.filter((part) => !part.stop).map((part) => want(part.term, SPLIT));
-    return { read: parts, wanted: [...told, ...tolerated] };
-  }
-  const mended = near[0] && vocabulary.isHead(near[0].surface) ? near[0] : undefined;
-  const read: Read = mended ? { ...plain, surface: mended.surface, term: mended.term, mended: 'tolerated' } : plain;
+  const tolerated = near.map((candidate) => want(word, candidate.term, candidate.near));
+  const isName = names.has(word.term);
+  const parts = partsOf(lean, word);
+  if (parts.length > 0) return { read: isName ? [word] : parts, wanted: [...wantParts(parts), ...tolerated] };
+  const begun = vocabulary.beginning(word.surface).map((candidate) => want(word, candidate.term, candidate.near));
+  const meant = !isName && near[0] && vocabulary.isHead(near[0].surface) ? near[0] : undefined;
+  const read: Read = meant ? { ...word, surface: meant.surface, term: meant.term, mended: 'tolerated' } : word;
   return { read: [read], wanted: [...tolerated, ...begun] };
 }
 
@@ -65,17 +83,19 @@ function joinedNeighbours(lean: LeanIndex, sequence: Read[]): Wanted[] {
 }
 
 /** Reads a question of any length and content against an index. Never throws. */
-export function readQuestion(lean: LeanIndex, query: string): Reading {
+export function readQuestion(index: Known, query: string): Reading {
   const words = cut(query);
   const last = words.findLastIndex((word) => !word.stop);
   const reading: Reading = { written: [], sequence: [], wanted: [] };
   words.forEach((word, i) => {
     if (word.stop) return void reading.sequence.push({ ...word, place: 0, mended: 'no' });
-    const { read, wanted } = readWord(lean, word, reading.written.length, i === last);
-    reading.written.push(word.written);
+    const place = reading.written.push(word.written) - 1;
+    const term = knownTerm(index.lean, word);
+    const plain: Read = { ...word, place, mended: 'no' };
+    const { read, wanted } = term ? readKnown(index, { ...plain, term }, i === last) : readUnknown(index, plain);
     reading.sequence.push(...read);
     reading.wanted.push(...wanted);
   });
-  reading.wanted.push(...joinedNeighbours(lean, reading.sequence));
+  reading.wanted.push(...joinedNeighbours(index.lean, reading.sequence));
   return reading;
 }

@@ -45,7 +45,7 @@ function countKinds(index: SearchIndex, scores: Float64Array): Record<SearchKind
  * @param limit hits wanted, 1 to 100, 20 unless told
  */
 export function searchLibrary(index: SearchIndex, { q, kind, limit = DEFAULT_HITS }: SearchQuestion): SearchAnswer {
-  const reading = readQuestion(index.lean, q);
+  const reading = readQuestion(index, q);
   const ranking = rank(index, reading);
   const pair = pairAmong(index, reading, ranking.spans);
   if (pair) favourPair(ranking, pair);

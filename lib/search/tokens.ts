@@ -54,6 +54,9 @@ const UNITS = 'mm|cm|m|in|inch|ft|cfm|fpm|ppm|mg|kg|g|l|ml|w|kw|v|c|f|h|s|pa|deg
 const CAS = /(?<![\w-])\d{2,7}-\d{2}-\d(?![\w-])/;
 const PART = new RegExp(`${CAS.source}|\\d+(?:\\.\\d+)+|\\d+(?=(?:${UNITS})(?![\\p{L}\\p{N}]))|[\\p{L}\\p{N}]+`, 'gu');
 
+/** True for a word shaped like a CAS number. */
+export const isCasNumber = (word: string): boolean => /^\d{2,7}-\d{2}-\d$/.test(word);
+
 /** True for a word that is compared whole: numbers, CAS numbers, formulas. It takes no part in beginnings and tolerance. */
 export const hasDigit = (word: string): boolean => /\p{N}/u.test(word);
 

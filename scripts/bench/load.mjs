@@ -51,14 +51,24 @@ const MEASURED = [
   ['/materials/pvc', '/check'],
 ];
 
-/** Requests a second and median milliseconds of each address against its trivial neighbour, turn by turn. Loopback only. */
-export async function serverSpeed(base, count = 400, connections = 8) {
+const ROUNDS = 3;
+const middle = (rounds) => ({
+  perSecond: median(rounds.map((round) => round.perSecond)),
+  median: median(rounds.map((round) => round.median)),
+});
+
+/** Requests a second and median milliseconds of each address against its trivial neighbour, round by round. Loopback only. */
+export async function serverSpeed(base, count = 200, connections = 8) {
   const { hostname } = new URL(base);
   if (!['127.0.0.1', 'localhost', '[::1]'].includes(hostname)) throw new Error('BENCH_BASE_URL must be on loopback');
   const rows = [];
   for (const [address, trivial] of MEASURED) {
-    const rival = await load(new URL(trivial, base), count, connections);
-    const ours = await load(new URL(address, base), count, connections);
+    const rounds = { ours: [], rival: [] };
+    for (let round = 0; round < ROUNDS; round += 1) {
+      rounds.rival.push(await load(new URL(trivial, base), count, connections));
+      rounds.ours.push(await load(new URL(address, base), count, connections));
+    }
+    const [ours, rival] = [middle(rounds.ours), middle(rounds.rival)];
     rows.push({ address, trivial, ours, rival, ratio: rival.perSecond / ours.perSecond });
   }
   return rows;

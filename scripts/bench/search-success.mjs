@@ -1,10 +1,12 @@
 import { readFileSync } from 'node:fs';
-import { contentDocuments } from '../../tests/lib/search/content-library.ts';
+import { WORKSHEETS } from '@/lib/worksheets/list';
 import { buildIndex } from '@/lib/search/build-index';
+import { documentsOf } from '@/lib/search/documents';
 import { searchLibrary } from '@/lib/search/search-library';
+import { contentLibrary } from '../../tests/lib/search/content-library.ts';
 import { plainMiniSearch } from './search-speed.mjs';
 
-/** Judged questions: what each accepts, and the nearest page while none of those exists. */
+/** Judged questions: what each accepts, and the nearest pages while none of those exists. */
 export function judgedQuestions(file) {
   const [, ...lines] = readFileSync(file, 'utf8').trim().split('\n');
   return lines.map((line) => {
@@ -13,27 +15,32 @@ export function judgedQuestions(file) {
   });
 }
 
+/** The judged questions that some page can answer, each with the pages that exist. */
+function answerable(questions, known) {
+  const existing = (ids) => ids.filter((id) => known.has(id));
+  return questions
+    .map((question) => ({ ...question, accepted: [existing(question.accepted), existing(question.nearest)] }))
+    .map((question) => ({ ...question, accepted: question.accepted.find((ids) => ids.length > 0) }))
+    .filter((question) => question.accepted);
+}
+
 const share = (count, of) => Math.round((1000 * count) / of) / 10;
 
 /** Success at 1 and 3 over judged questions on the real content: the share whose first hit, or first three, hold an accepted page. */
 export async function searchSuccess(file) {
-  const documents = contentDocuments();
-  const known = new Set(documents.map((document) => document.id));
+  const documents = documentsOf(contentLibrary(), WORKSHEETS);
   const index = await buildIndex(documents);
   const plain = plainMiniSearch(documents);
   const rivals = {
     ours: (q) => searchLibrary(index, { q, limit: 3 }).hits.map((hit) => `${hit.kind}:${hit.slug}`),
-    plain: (q) => plain.search(q).map((hit) => hit.id),
+    'MiniSearch as it comes': (q) => plain.search(q).map((hit) => hit.id),
   };
-  const questions = judgedQuestions(file)
-    .map((question) => {
-      const accepted = question.accepted.filter((id) => known.has(id));
-      return { ...question, accepted: accepted.length > 0 ? accepted : question.nearest.filter((id) => known.has(id)) };
-    })
-    .filter((question) => question.accepted.length > 0);
+  const all = judgedQuestions(file);
+  const questions = answerable(all, new Set(documents.map((document) => document.id)));
+  const counts = { documents: documents.length, questions: questions.length, left: all.length - questions.length };
   return Object.entries(rivals).map(([name, find]) => {
     const places = questions.map(({ query, accepted }) => find(query).findIndex((id) => accepted.includes(id)));
     const within = (limit) => share(places.filter((place) => place >= 0 && place < limit).length, questions.length);
-    return { name, documents: documents.length, questions: questions.length, at1: within(1), at3: within(3) };
+    return { name, ...counts, at1: within(1), at3: within(3) };
   });
 }

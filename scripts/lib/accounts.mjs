@@ -20,6 +20,7 @@ export function accountsSql(database, secrets, forTests) {
     `CREATE DATABASE IF NOT EXISTS \`${database}\` CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci;`,
     'SET sql_log_bin = 0;',
     `DELETE FROM mysql.global_priv WHERE (User = 'root' AND Host <> 'localhost') OR User = '';`,
+    `DELETE FROM mysql.proxies_priv WHERE Host <> 'localhost';`,
     'FLUSH PRIVILEGES;',
     `ALTER USER 'root'@'localhost' IDENTIFIED BY '${secrets.root}';`,
     ...account('fumelore_app', secrets.app, APP, `\`${database}\`.*`),

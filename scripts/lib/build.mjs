@@ -1,5 +1,4 @@
 import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
-import { join } from 'node:path';
 import { run } from './children.mjs';
 import { programEnv } from './jobs.mjs';
 import { inRoot, ROOT, shown } from './root.mjs';

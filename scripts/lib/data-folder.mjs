@@ -70,7 +70,9 @@ export const mustBeMade = (place) => !existsSync(place.database) || existsSync(p
 /** Clears what an unfinished making left, and marks the next one as unfinished. @param {Place} place @returns {boolean} whether there was any */
 export function beginMaking(place) {
   const left = existsSync(place.database);
-  writeFileSync(place.unfinished, 'The first start has not come to its end: the database here is made anew.\n', { mode: 0o600 });
+  writeFileSync(place.unfinished, 'The first start has not come to its end: the database here is made anew.\n', {
+    mode: 0o600,
+  });
   rmSync(place.database, { recursive: true, force: true });
   mkdirSync(place.database, { mode: 0o700 });
   return left;
@@ -83,5 +85,7 @@ export const finishMaking = (place) => rmSync(place.unfinished, { force: true })
 export function requireWhole(place) {
   if (existsSync(join(place.database, 'ibdata1')) && existsSync(join(place.database, 'mysql'))) return;
   const name = shown(place.database);
-  throw new Trouble(`${name} is not a whole database: put a copy back, or move ${name} away to begin anew. Nothing was changed.`);
+  throw new Trouble(
+    `${name} is not a whole database: put a copy back, or move ${name} away to begin anew. Nothing was changed.`,
+  );
 }

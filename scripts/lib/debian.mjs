@@ -32,7 +32,10 @@ export async function ensurePrograms(title, programs, packages, log, doing) {
   const byHand = `apt-get update && apt-get install -y --no-install-recommends ${packages.join(' ')}`;
   if (process.getuid?.() !== 0) throw new Trouble(`${title} is missing: as root, ${byHand}`);
   const apt = findProgram('apt-get');
-  if (!apt) throw new Trouble(`${title} is missing, and so is apt-get: install ${packages.join(' and ')} with this system's own tool.`);
+  if (!apt)
+    throw new Trouble(
+      `${title} is missing, and so is apt-get: install ${packages.join(' and ')} with this system's own tool.`,
+    );
   doing("installing Debian's packages, once");
   const options = { log, env: { DEBIAN_FRONTEND: 'noninteractive' }, patient: true, grace: 600 };
   const wait = ['-o', 'DPkg::Lock::Timeout=120'];

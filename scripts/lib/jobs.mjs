@@ -22,9 +22,19 @@ export const programEnv = (database) => ({
  */
 export async function migrate(place, database, job) {
   const log = place.log('migrate');
-  const env = { MIGRATION_DATABASE_URL: database.migrateUrl, DATABASE_URL: database.migrateUrl, FUMELORE_OURS: database.ours ? 'yes' : '' };
+  const env = {
+    MIGRATION_DATABASE_URL: database.migrateUrl,
+    DATABASE_URL: database.migrateUrl,
+    FUMELORE_OURS: database.ours ? 'yes' : '',
+  };
   const args = [...TYPESCRIPT, `${ROOT}/scripts/lib/migrate-job.mjs`, job];
-  const { code, text } = await run('migrations', process.execPath, args, { log, env, out: 'text', patient: true, grace: 120 });
+  const { code, text } = await run('migrations', process.execPath, args, {
+    log,
+    env,
+    out: 'text',
+    patient: true,
+    grace: 120,
+  });
   if (code !== 0) throw new Trouble(lastLine(text) || `The tables could not be changed; see ${shown(log)}.`);
   return lastLine(text);
 }
@@ -34,6 +44,7 @@ export async function takeUpLibrary(place, database) {
   const log = place.log('seed');
   const args = [...TYPESCRIPT, 'scripts/seed.ts'];
   const { code, text } = await run('seed', process.execPath, args, { log, env: programEnv(database), out: 'text' });
-  if (code !== 0) throw new Trouble(`The starter library was not taken up: ${lastLine(text) || 'it broke off'}. See ${shown(log)}.`);
+  if (code !== 0)
+    throw new Trouble(`The starter library was not taken up: ${lastLine(text) || 'it broke off'}. See ${shown(log)}.`);
   return lastLine(text).replace(/^library: /, '');
 }

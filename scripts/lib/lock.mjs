@@ -18,7 +18,9 @@ export const holderOf = (folder) =>
   new Promise((resolve) => {
     if (process.platform !== 'linux') return resolve(null);
     let text = '';
-    const socket = connect(nameOf(folder)).setEncoding('utf8').setTimeout(3000, () => socket.destroy());
+    const socket = connect(nameOf(folder))
+      .setEncoding('utf8')
+      .setTimeout(3000, () => socket.destroy());
     socket.on('data', (part) => (text += part)).on('error', () => resolve(null));
     socket.on('close', () => resolve(text ? JSON.parse(text) : null));
   });

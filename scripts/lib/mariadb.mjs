@@ -43,7 +43,9 @@ export async function makeFiles(place) {
   const folder = plainName(shortFolder(place.folder), place.database);
   const how = ['--auth-root-authentication-method=normal', '--skip-test-db', '--skip-log-bin'];
   const args = ['--no-defaults', ...asUser(), `--datadir=${folder}`, ...how];
-  const { code } = await run('mariadb-install-db', findProgram('mariadb-install-db') ?? 'mariadb-install-db', args, { log });
+  const { code } = await run('mariadb-install-db', findProgram('mariadb-install-db') ?? 'mariadb-install-db', args, {
+    log,
+  });
   if (code !== 0) throw new Trouble(`The database could not be made; see ${shown(log)}.`);
 }
 
@@ -60,8 +62,12 @@ const greets = (port) =>
 
 /** Why the server did not come up, from what it logged since. @param {string} log @param {number} since */
 function whyNot(log, since) {
-  const errors = readFileSync(log, 'utf8').slice(since).match(/\[ERROR\] .*/g) ?? [];
-  if (errors.some((line) => /Unable to lock|lock .*error: 11/i.test(line))) return 'its files are in use by another program';
+  const errors =
+    readFileSync(log, 'utf8')
+      .slice(since)
+      .match(/\[ERROR\] .*/g) ?? [];
+  if (errors.some((line) => /Unable to lock|lock .*error: 11/i.test(line)))
+    return 'its files are in use by another program';
   return errors.find((line) => !/Aborting/.test(line))?.replace('[ERROR] ', '') ?? 'it said nothing';
 }
 
@@ -96,24 +102,27 @@ export async function startMariadb(place, database, forTests) {
 
 /** @param {import('./data-folder.mjs').Place} place @param {number} port @param {string} accounts @param {string} log */
 function serve(place, port, accounts, log) {
+  const short = shortFolder(place.folder);
   const args = [
     '--no-defaults',
     ...asUser(),
     ...SETTINGS,
     `--datadir=${place.database}`,
     `--port=${port}`,
-    `--socket=${join(shortFolder(place.folder), 'socket')}`,
+    `--socket=${join(short, 'socket')}`,
     `--pid-file=${join(place.folder, 'mariadb.pid')}`,
     `--init-file=${accounts}`,
   ];
-  return launch('database', findProgram('mariadbd') ?? 'mariadbd', args, { log, grace: 60 });
+  const child = launch('database', findProgram('mariadbd') ?? 'mariadbd', args, { log, grace: 60 });
+  child.done.then(() => rmSync(short, { recursive: true, force: true }));
+  return child;
 }
 
 /** @param {import('./children.mjs').Child} child @param {number} port */
 async function untilUp(child, port) {
   let ended = false;
   child.done.then(() => (ended = true));
-  for (const until = Date.now() + BOOT_SECONDS * 1000; Date.now() < until && !ended; ) {
+  for (const until = Date.now() + BOOT_SECONDS * 1000; Date.now() < until && !ended;) {
     if (await greets(port)) return !ended;
     await new Promise((resolve) => setTimeout(resolve, 100));
   }

@@ -22,7 +22,9 @@ async function latest() {
   const unknown = await unknownChanges();
   if (unknown.length > 0) {
     const names = unknown.slice(0, 2).join(', ');
-    throw new Error(`The database comes from a newer version: it holds ${changes(unknown.length)} this one does not know (${names}).`);
+    throw new Error(
+      `The database comes from a newer version: it holds ${changes(unknown.length)} this one does not know (${names}).`,
+    );
   }
   // Nobody else can be at work on the private database: a lock there was left by a killed run.
   if (process.env.FUMELORE_OURS) await knex.migrate.forceFreeMigrationsLock();
@@ -47,7 +49,8 @@ function lineFor(error) {
     return 'Another run is changing these tables, or was cut off: when none runs, node scripts/db.mjs unlock.';
   if (['ECONNREFUSED', 'ENOTFOUND', 'ETIMEDOUT', 'EHOSTUNREACH'].includes(error.code))
     return `The database at ${config.connection.host}:${config.connection.port} does not answer (${error.code}).`;
-  if (error.errno === 1045) return `The database turned the account ${config.connection.user} away: wrong name or password.`;
+  if (error.errno === 1045)
+    return `The database turned the account ${config.connection.user} away: wrong name or password.`;
   const said = error.sqlMessage ?? error.message.split('\n')[0];
   return error.sqlMessage ? `The tables could not be changed: ${said}.` : said;
 }

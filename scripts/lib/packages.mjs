@@ -19,7 +19,9 @@ export function packagesAreIn(root) {
   return Object.entries(read(join(root, 'package-lock.json'))).every(([path, wanted]) => {
     if (path === '') return true;
     // A package for another kind of machine is named in the lock file and never installed.
-    return installed[path] ? installed[path].version === wanted.version : Boolean(wanted.optional || wanted.devOptional);
+    return installed[path]
+      ? installed[path].version === wanted.version
+      : Boolean(wanted.optional || wanted.devOptional);
   });
 }
 

@@ -26,7 +26,9 @@ export async function sitePort(text) {
     throw new Trouble(`PORT is "${text}": it takes a whole number from 1 to 65535.`);
   const { fault } = await tryPort(port);
   if (fault === 'EADDRINUSE')
-    throw new Trouble(`Port ${port} is taken by another program: stop that one, or choose another, PORT=${port + 1} npm start.`);
+    throw new Trouble(
+      `Port ${port} is taken by another program: stop that one, or choose another, PORT=${port + 1} npm start.`,
+    );
   if (fault) throw new Trouble(`Port ${port} may not be used here (${fault}): choose another, PORT=3000 npm start.`);
   return port;
 }

@@ -44,7 +44,7 @@ function send(pid, signal) {
 /** @param {() => { pid: number }[]} left @param {number} seconds */
 async function end(left, seconds) {
   for (const { pid } of left()) send(pid, 'SIGTERM');
-  for (const until = Date.now() + seconds * 1000; left().length > 0; ) {
+  for (const until = Date.now() + seconds * 1000; left().length > 0;) {
     if (Date.now() > until) for (const { pid } of left()) send(pid, 'SIGKILL');
     await new Promise((resolve) => setTimeout(resolve, 50));
   }

@@ -2,7 +2,7 @@ import { launch } from './children.mjs';
 import { programEnv } from './jobs.mjs';
 import { NEXT } from './build.mjs';
 import { shown } from './root.mjs';
-import { lastLine, Trouble } from './trouble.mjs';
+import { Trouble } from './trouble.mjs';
 
 const READY_SECONDS = 60;
 
@@ -12,7 +12,11 @@ const READY_SECONDS = 60;
 async function health(port) {
   try {
     const reply = await fetch(`http://127.0.0.1:${port}/api/health/ready`, { signal: AbortSignal.timeout(30_000) });
-    return { ready: reply.ok, said: lastLine(await reply.text()) };
+    const text = await reply.text();
+    return {
+      ready: reply.ok,
+      said: reply.ok ? '' : (/"detail":"([^"]*)"/.exec(text)?.[1] ?? `it answers ${reply.status}`),
+    };
   } catch {
     return { ready: false, said: 'it does not answer' };
   }
@@ -30,7 +34,7 @@ export async function startWebsite(place, database, { port, dist, baseUrl, dev =
   let ended = false;
   child.done.then(() => (ended = true));
   let now = await health(port);
-  for (const until = Date.now() + READY_SECONDS * 1000; !now.ready && !ended && Date.now() < until; ) {
+  for (const until = Date.now() + READY_SECONDS * 1000; !now.ready && !ended && Date.now() < until;) {
     await new Promise((resolve) => setTimeout(resolve, 200));
     now = await health(port);
   }

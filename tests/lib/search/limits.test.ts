@@ -27,7 +27,7 @@ describe('limits of a question', () => {
   it.each([MAX_QUERY_TERMS - 1, MAX_QUERY_TERMS, MAX_QUERY_TERMS + 1])(
     'reads ten of %i telling words at most',
     (count) => {
-      const { written } = readQuestion(index.lean, wordsNamed(count).join(' '));
+      const { written } = readQuestion(index, wordsNamed(count).join(' '));
       expect(written).toHaveLength(Math.min(count, MAX_QUERY_TERMS));
     },
   );
@@ -135,7 +135,7 @@ describe('any text at all', () => {
       fc.asyncProperty(text, text, async (title, body) => {
         const odd = documentFor('guide', 'odd', { title, names: [body], everyday: [body], text: body, codes: [title] });
         const built = await buildIndex([odd, ...FIXTURE]);
-        const { written } = readQuestion(built.lean, title);
+        const { written } = readQuestion(built, title);
         if (written.length > 0) expect(searchLibrary(built, { q: title, limit: 100 }).total).toBeGreaterThan(0);
       }),
       { numRuns: 40 },

@@ -32,9 +32,9 @@ export function pluralOf(title: string): string[] {
   return [`${title}s`];
 }
 
-/** A title of several words as one, hyphenated, and with each two neighbours joined. */
+/** A title of two or three words as one and hyphenated; of any title, each two neighbours joined. */
 export function joinedTitles(title: string): string[] {
-  const words = title.toLowerCase().match(/[\p{L}\p{N}]+/gu) ?? [];
+  const words = /\d/.test(title) ? [] : (title.toLowerCase().match(/\p{L}+/gu) ?? []);
   if (words.length < 2) return [];
   const pairs = words.slice(1).map((_, i) =>
     words
@@ -42,7 +42,8 @@ export function joinedTitles(title: string): string[] {
       .join('')
       .trim(),
   );
-  return [words.join(''), words.join('-'), ...pairs.map((joined) => joined.replace(/\s+/g, ' '))];
+  const whole = words.length <= 3 ? [words.join(''), words.join('-')] : [];
+  return [...whole, ...pairs.map((joined) => joined.replace(/\s+/g, ' '))];
 }
 
 /** British against American, as the style guides of both give them. */
