@@ -19,10 +19,12 @@ export const MAX_NAME_WORDS = 7;
 const OTHER_NAME = 0.75;
 const CODE = 0.9;
 
+/** A name's keys: whole, and without its stop words where two telling words are left (`duct and fan`, but never `weld` for `weld-on`). */
 const keysOf = (name: string): string[] => {
   const words = wordsOf(name);
   const told = words.filter((word) => !word.stop);
-  return [...new Set([joined(words), joined(told)])].filter((key) => key.length > 1);
+  const keys = told.length > 1 ? [joined(words), joined(told)] : [joined(words)];
+  return [...new Set(keys)].filter((key) => key.length > 1);
 };
 
 function addName(names: NameDictionary, name: string, document: number, weight: number): void {

@@ -1,9 +1,7 @@
 import { readFileSync } from 'node:fs';
-import { WORKSHEETS } from '@/lib/worksheets/list';
 import { buildIndex } from '@/lib/search/build-index';
-import { documentsOf } from '@/lib/search/documents';
 import { searchLibrary } from '@/lib/search/search-library';
-import { contentLibrary } from '../../tests/lib/search/content-library.ts';
+import { contentDocuments } from '../../tests/lib/search/content-library.ts';
 import { plainMiniSearch } from './search-speed.mjs';
 
 /** Judged questions: what each accepts, and the nearest pages while none of those exists. */
@@ -28,7 +26,7 @@ const share = (count, of) => Math.round((1000 * count) / of) / 10;
 
 /** Success at 1 and 3 over judged questions on the real content: the share whose first hit, or first three, hold an accepted page. */
 export async function searchSuccess(file) {
-  const documents = documentsOf(contentLibrary(), WORKSHEETS);
+  const documents = contentDocuments();
   const index = await buildIndex(documents);
   const plain = plainMiniSearch(documents);
   const rivals = {

@@ -4,8 +4,9 @@ import { checkLibrary } from '@/lib/entries/check-library';
 import type { Library, PublishedEntry } from '@/lib/entries/library';
 import { FOLDERS } from '@/lib/entries/vocabulary';
 import { buildIndex, type SearchIndex } from '@/lib/search/build-index';
-import { documentsOf, type WorksheetWords } from '@/lib/search/documents';
+import { documentsOf } from '@/lib/search/documents';
 import type { SearchDocument } from '@/lib/search/search';
+import { WORKSHEETS } from '@/lib/worksheets/list';
 
 const read = (folder: string) =>
   readdirSync(folder)
@@ -26,18 +27,10 @@ export function contentLibrary(): Library {
   return { version: 1, entries: published, byKey, sources: new Map() };
 }
 
-export const HOOD_AIRFLOW: WorksheetWords = {
-  name: 'hood-airflow',
-  title: 'Airflow for a hood',
-  summary: 'How much air a hood needs so that it catches what is released at a distance in front of it.',
-  names: ['hood airflow', 'capture velocity', 'fume extractor size', 'how much air'],
-  everyday: ['smoke drifts past the hood', 'what size fan', 'cfm for a bench'],
-};
-
 export type Content = { documents: SearchDocument[]; index: SearchIndex };
 
-/** What the search knows of the real content and one worksheet. */
-export const contentDocuments = (): SearchDocument[] => documentsOf(contentLibrary(), [HOOD_AIRFLOW]);
+/** What the search knows of the real content and the worksheets. */
+export const contentDocuments = (): SearchDocument[] => documentsOf(contentLibrary(), WORKSHEETS);
 
 /** The index over the same. */
 export async function contentIndex(): Promise<Content> {

@@ -1,15 +1,16 @@
 import { describe, expect, it } from 'vitest';
 import { documentsOf } from '@/lib/search/documents';
 import { plainText } from '@/lib/search/plain-text';
-import { contentLibrary, HOOD_AIRFLOW } from './content-library';
+import { WORKSHEETS } from '@/lib/worksheets/list';
+import { contentLibrary } from './content-library';
 
 const library = contentLibrary();
-const documents = documentsOf(library, [HOOD_AIRFLOW]);
+const documents = documentsOf(library, WORKSHEETS);
 const byId = new Map(documents.map((document) => [document.id, document]));
 
 describe('what the search knows of a library', () => {
   it('holds one document a page', () => {
-    expect(documents).toHaveLength(library.entries.length + 1);
+    expect(documents).toHaveLength(library.entries.length + WORKSHEETS.length);
     expect(byId.size).toBe(documents.length);
   });
 

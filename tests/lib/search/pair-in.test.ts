@@ -58,6 +58,12 @@ describe('a pair in a question', () => {
     });
   });
 
+  it('does not take half of a name for the name, when the rest is a small word', async () => {
+    const glue = documentFor('material', 'glue', { title: 'Solvent cement', names: ['Weld-On'] });
+    const welding = documentFor('process', 'welding', { title: 'Welding', names: ['MIG'] });
+    expect(pairIn('mig welding', await buildIndex([glue, welding]))).toBeUndefined();
+  });
+
   it('does not take a substance for the material in its name', () => {
     expect(pairIn('laser copper fume', index)).toBeUndefined();
   });
