@@ -1,6 +1,5 @@
 import Link from 'next/link';
 import { CheckForm } from '@/components/check/check-form';
-import { SearchForm } from '@/components/search/search-form';
 import { Caution } from '@/components/ui/caution';
 import { Panel } from '@/components/ui/panel';
 
@@ -25,7 +24,6 @@ export default function FrontPage() {
           whether your hood has the air for it. Every figure shows where it comes from.
         </p>
       </header>
-      <SearchForm q="" />
       <Panel title="Check a material and a process">
         <CheckForm materials={[]} process="" />
       </Panel>

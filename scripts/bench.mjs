@@ -35,9 +35,9 @@ async function searchAgainstDatabase() {
 async function successOfSearch() {
   const { searchSuccess } = await import('./bench/search-success.mjs');
   console.log('Success on judged questions, real content:');
-  for (const { name, documents, questions, left, at1, at3 } of await searchSuccess('tests/data/search-queries.tsv'))
+  for (const { group, name, documents, questions, at1, at3 } of await searchSuccess('tests/data/search-queries.tsv'))
     console.log(
-      `  ${name}: first ${at1} %, first three ${at3} %   (${questions} questions, ${left} without a page yet, ${documents} documents)`,
+      `  ${name}: first ${at1} %, first three ${at3} %   (${questions} questions, ${group}; ${documents} documents)`,
     );
 }
 

@@ -24,7 +24,7 @@ export function Emissions({ it, names }: { it: Material; names: EntryNames }) {
           <tbody>
             {emissions.map((each, i) => (
               <tr key={i} className="border-b border-rule align-top">
-                <th scope="row" className="p-2 text-left font-normal">
+                <th scope="row" className="p-2 text-left align-top font-normal">
                   {names[`process:${each.process}`] ?? each.process}
                 </th>
                 <td className="p-2">{each.quantity}</td>

@@ -16,15 +16,15 @@ export function EntryPage({ view: { entry, html, sources, names }, kindWord, pla
   const { frontMatter: it } = entry;
   return (
     <article>
-      <header className="max-w-measure">
-        <p className="label">{kindWord}</p>
-        <h1>{entry.title}</h1>
-        <p className="font-reading mt-3 text-xl leading-relaxed">{it.summary}</p>
-        <OtherNames names={it.otherNames} />
-      </header>
-      <div className="mt-6 gap-x-10 lg:grid lg:grid-cols-[minmax(0,1fr)_22rem]">
-        {plate && <div className="mb-8 lg:order-2">{plate}</div>}
-        <div className="min-w-0 lg:order-1">
+      <div className="gap-x-10 lg:grid lg:grid-cols-[minmax(0,1fr)_22rem] lg:grid-rows-[auto_1fr]">
+        <header className="max-w-measure">
+          <p className="label">{kindWord}</p>
+          <h1>{entry.title}</h1>
+          <p className="font-reading mt-3 text-xl leading-relaxed">{it.summary}</p>
+          <OtherNames names={it.otherNames} />
+        </header>
+        {plate && <div className="my-6 lg:col-start-2 lg:row-span-2 lg:row-start-1 lg:my-0">{plate}</div>}
+        <div className="mt-6 min-w-0">
           {facts}
           <div className="mt-8">
             <Prose html={html} />

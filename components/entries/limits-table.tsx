@@ -14,7 +14,7 @@ function LimitRow({ limit, sources }: { limit: Limit; sources: string[] }) {
   const past = Boolean(limit.supersededBy);
   return (
     <tr className={`border-b border-rule align-top ${past ? 'text-quiet' : ''}`}>
-      <th scope="row" className="p-2 text-left font-semibold">
+      <th scope="row" className="p-2 text-left align-top font-semibold">
         {limit.authority}
       </th>
       <td className="p-2">

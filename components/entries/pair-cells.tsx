@@ -43,7 +43,7 @@ function PairCapture({ pair }: { pair: Pair }) {
 export function PairCells({ material, pair, names, sources }: Props) {
   return (
     <>
-      <th scope="row" className="p-2 text-left">
+      <th scope="row" className="p-2 text-left align-top">
         <Link href={`/processes/${pair.process}`} prefetch={false}>
           {names[`process:${pair.process}`] ?? pair.process}
         </Link>

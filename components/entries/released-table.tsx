@@ -38,7 +38,7 @@ export function ReleasedTable({ releases }: { releases: ReleasedSubstance[] }) {
         <tbody>
           {releases.map((each) => (
             <tr key={each.substance} className="border-b border-rule align-top">
-              <th scope="row" className="p-2 text-left">
+              <th scope="row" className="p-2 text-left align-top">
                 <Link href={`/substances/${each.substance}`} prefetch={false}>
                   {each.name}
                 </Link>

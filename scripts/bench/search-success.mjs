@@ -17,6 +17,7 @@ export function judgedQuestions(file) {
 function answerable(questions, known) {
   const existing = (ids) => ids.filter((id) => known.has(id));
   return questions
+    .map((question) => ({ ...question, whole: question.accepted.every((id) => known.has(id)) }))
     .map((question) => ({ ...question, accepted: [existing(question.accepted), existing(question.nearest)] }))
     .map((question) => ({ ...question, accepted: question.accepted.find((ids) => ids.length > 0) }))
     .filter((question) => question.accepted);
@@ -33,12 +34,16 @@ export async function searchSuccess(file) {
     ours: (q) => searchLibrary(index, { q, limit: 3 }).hits.map((hit) => `${hit.kind}:${hit.slug}`),
     'MiniSearch as it comes': (q) => plain.search(q).map((hit) => hit.id),
   };
-  const all = judgedQuestions(file);
-  const questions = answerable(all, new Set(documents.map((document) => document.id)));
-  const counts = { documents: documents.length, questions: questions.length, left: all.length - questions.length };
-  return Object.entries(rivals).map(([name, find]) => {
-    const places = questions.map(({ query, accepted }) => find(query).findIndex((id) => accepted.includes(id)));
-    const within = (limit) => share(places.filter((place) => place >= 0 && place < limit).length, questions.length);
-    return { name, ...counts, at1: within(1), at3: within(3) };
-  });
+  const questions = answerable(judgedQuestions(file), new Set(documents.map((document) => document.id)));
+  const groups = {
+    'all, the nearest page where one is missing': questions,
+    'whose pages all exist': questions.filter(({ whole }) => whole),
+  };
+  return Object.entries(groups).flatMap(([group, asked]) =>
+    Object.entries(rivals).map(([name, find]) => {
+      const places = asked.map(({ query, accepted }) => find(query).findIndex((id) => accepted.includes(id)));
+      const within = (limit) => share(places.filter((place) => place >= 0 && place < limit).length, asked.length);
+      return { group, name, documents: documents.length, questions: asked.length, at1: within(1), at3: within(3) };
+    }),
+  );
 }

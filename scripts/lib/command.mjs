@@ -2,6 +2,14 @@ import { isStopping, stopAll } from './children.mjs';
 import { lineFor, Stopped } from './trouble.mjs';
 
 const SIGNALS = /** @type {NodeJS.Signals[]} */ (['SIGINT', 'SIGTERM', 'SIGHUP']);
+const LOOK_MS = 300;
+
+/** Npm passes a signal to the shell between it and us, which dies of it and tells nobody: being orphaned is the sign. @param {() => void} ask */
+function heedNpm(ask) {
+  if (!process.env.npm_lifecycle_event) return;
+  const parent = process.ppid;
+  setInterval(() => process.ppid !== parent && ask(), LOOK_MS).unref();
+}
 
 /** Rejects at the first signal. Npm passes on what the terminal sent already, so later ones say nothing new. */
 const stopAsked = () =>
@@ -14,6 +22,7 @@ const stopAsked = () =>
       reject(new Stopped());
     };
     for (const name of SIGNALS) process.on(name, ask);
+    heedNpm(ask);
   });
 
 /**
