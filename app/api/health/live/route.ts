@@ -1,3 +1,3 @@
 export const dynamic = 'force-dynamic';
 
-export const GET = () => Response.json({ status: 'live' }, { headers: { 'cache-control': 'no-store' } });
+export const GET = async () => Response.json({ status: 'live' }, { headers: { 'cache-control': 'no-store' } });
