@@ -1,4 +1,4 @@
-import { readdirSync, readFileSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { checkLibrary } from '@/lib/entries/check-library';
 import { FOLDERS } from '@/lib/entries/vocabulary';

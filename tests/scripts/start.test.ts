@@ -24,11 +24,8 @@ const NOBODY = 65_534;
 
 const start = (env: Record<string, string>, uid?: number): Promise<{ code: number | null; lines: string[] }> =>
   new Promise((resolve) => {
-    const child = spawn(process.execPath, ['scripts/start.mjs'], {
-      cwd: root,
-      uid,
-      env: { PATH: '/usr/bin:/bin', ...env },
-    });
+    const alone = { NODE_ENV: 'production' as const, PATH: '/usr/bin:/bin', ...env };
+    const child = spawn(process.execPath, ['scripts/start.mjs'], { cwd: root, uid, env: alone });
     let said = '';
     for (const stream of [child.stdout, child.stderr]) stream.on('data', (part) => (said += part));
     child.on('close', (code) => resolve({ code, lines: said.trimEnd().split('\n') }));
