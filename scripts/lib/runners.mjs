@@ -56,7 +56,7 @@ export async function runBrowser(place, database, reports, step) {
   }
   const { code } = await run('browser', process.execPath, ['node_modules/@playwright/test/cli.js', 'test'], {
     log: place.log('browser'),
-    env: { BASE_URL: address, PLAYWRIGHT_JSON_OUTPUT_FILE: file },
+    env: { BASE_URL: address, SITE_DATABASE_URL: database.url, PLAYWRIGHT_JSON_OUTPUT_FILE: file },
     out: 'inherit',
   });
   return tallyPlaywright(file, code);
