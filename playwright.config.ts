@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { defineConfig } from '@playwright/test';
@@ -13,9 +14,12 @@ const ALONE = [
   '--disable-sync',
 ];
 
+/** Emptied at every run, so each checkout has one of its own. */
+const CHECKOUT = createHash('sha256').update(process.cwd()).digest('hex').slice(0, 10);
+
 const config = defineConfig({
   testDir: './tests/browser',
-  outputDir: join(tmpdir(), `fumelore-browser-${process.getuid?.() ?? 0}`),
+  outputDir: join(tmpdir(), `fumelore-browser-${process.getuid?.() ?? 0}-${CHECKOUT}`),
   fullyParallel: true,
   workers: 2,
   retries: 0,

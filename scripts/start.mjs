@@ -55,8 +55,8 @@ await command(async () => {
   const website = await startWebsite(place, database, site);
   step.done('website', 'ready');
   holder.address = address;
-  if (settings.FUMELORE_DEMO === 'on')
-    console.log('This is the demo: its people and its workshop are invented, and there is no sign-in yet.');
+  console.log('There is no sign-in in this version yet: every visitor reads, and nobody edits.');
+  if (settings.FUMELORE_DEMO === 'on') console.log('This is the demo: its people and its workshop are invented.');
   console.log(`Fumelore is at ${address} (Ctrl-C stops it)`);
   await watch(place, { website, database: database.child });
 });

@@ -10,7 +10,7 @@ export function Emissions({ it, names }: { it: Material; names: EntryNames }) {
   return (
     <section aria-labelledby="measured" className="mt-8">
       <h2 id="measured">What has been measured</h2>
-      <TableScroll label="Measured emissions">
+      <TableScroll label="Table of measured emissions">
         <table className="mt-2 w-full min-w-[34rem] border-collapse">
           <thead>
             <tr className="label border-b-2 border-ink text-left">

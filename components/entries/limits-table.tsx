@@ -48,7 +48,7 @@ export function LimitsTable({ limits, sources, note }: { limits: Limit[]; source
       {limits.length === 0 ? (
         <p className="mt-2">No numeric limit is recorded here. That is not permission: it is a gap.</p>
       ) : (
-        <TableScroll label="Exposure limits">
+        <TableScroll label="Table of exposure limits">
           <table className="mt-2 w-full min-w-[34rem] border-collapse">
             <thead>
               <tr className="label border-b-2 border-ink text-left">

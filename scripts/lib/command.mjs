@@ -26,13 +26,13 @@ const stopAsked = () =>
   });
 
 /**
- * Runs a command to its end: its code when it has one, 1 and one line for any fault, 0 when it was asked to stop; and always with
- * everything it started stopped first.
- * @param {() => Promise<number | void>} work
+ * Runs a command to its end: its code when it has one, 1 and one line for any fault, `stopped` when it was asked to stop; and always
+ * with everything it started stopped first.
+ * @param {() => Promise<number | void>} work @param {{ stopped?: number }} [codes] 0 unless told: a website is stopped, not broken
  */
-export async function command(work) {
+export async function command(work, { stopped = 0 } = {}) {
   for (const stream of [process.stdout, process.stderr]) stream.on('error', () => undefined);
-  let code = 0;
+  let code = stopped;
   try {
     code = (await Promise.race([work(), stopAsked()])) ?? 0;
   } catch (error) {

@@ -9,10 +9,13 @@ import { lastLine, Trouble } from './trouble.mjs';
 
 const TYPESCRIPT = ['--conditions=react-server', '--import', 'tsx'];
 
-/** The program never learns the password that may change tables. @param {Database} database */
+/**
+ * The program never learns the password that may change tables: Next reads .env by itself, but leaves alone what is set, even to nothing.
+ * @param {Database} database
+ */
 export const programEnv = (database) => ({
   DATABASE_URL: database.url,
-  MIGRATION_DATABASE_URL: undefined,
+  MIGRATION_DATABASE_URL: '',
   NEXT_TELEMETRY_DISABLED: '1',
 });
 

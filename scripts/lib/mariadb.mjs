@@ -27,6 +27,8 @@ const SETTINGS = [
   '--server-id=1',
   '--log-bin=changes',
   '--binlog-format=ROW',
+  // A trigger may be made without SUPER: rows are logged, not statements.
+  '--log-bin-trust-function-creators=ON',
   '--sync-binlog=1',
   '--max-binlog-size=64M',
   '--binlog-expire-logs-seconds=259200',

@@ -32,7 +32,7 @@ const COMMAND = `import { command } from './scripts/lib/command.mjs';
     console.log('up');
     if (fault) throw new Error(fault);
     await child.done;
-  });`;
+  }, JSON.parse(process.env.CODES ?? '{}'));`;
 
 async function started(...more: string[]) {
   const args = ['--input-type=module', '-e', COMMAND, folder, SERVER, ...more];
@@ -60,6 +60,15 @@ describe('a command', () => {
     const { child, ended } = await started();
     for (const signal of ['SIGINT', 'SIGINT', 'SIGTERM'] as const) child.kill(signal);
     expect(await ended).toEqual({ code: 0, said: 'up\nStopping.\n' });
+    expect(wroteItsEnd()).toBe('clean');
+  });
+
+  it('ends with a code of its own where to be cut short is to fail', async () => {
+    process.env.CODES = '{"stopped":130}';
+    const { child, ended } = await started();
+    delete process.env.CODES;
+    child.kill('SIGINT');
+    expect(await ended).toEqual({ code: 130, said: 'up\nStopping.\n' });
     expect(wroteItsEnd()).toBe('clean');
   });
 
