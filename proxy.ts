@@ -32,7 +32,7 @@ export const config = {
     '/search',
     '/check',
     '/library',
-    '/worksheets/:path*',
+    '/worksheets/:path+',
     '/desk/:path*',
     '/classes/:path*',
     '/administration/:path*',

@@ -6,6 +6,10 @@ test('a laminate is checked by both its materials, and the address can be sent t
 }) => {
   await page.goto('/check');
   await page.getByLabel('What is it made of?').fill('plywood');
+  await page
+    .getByRole('option', { name: /^Plywood/ })
+    .first()
+    .click();
   await page.getByRole('button', { name: 'Add a layer' }).click();
   await page.getByLabel('And layer 2?').fill('PVC, rigid');
   const process = page.getByLabel('What will you do with it?');

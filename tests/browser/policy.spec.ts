@@ -32,7 +32,7 @@ for (const path of [...STORED, ...ASKED])
     expect(policy).toMatch(/frame-ancestors 'none'/);
     expect(policy.includes("'nonce-")).toBe(ASKED.includes(path));
     expect(refused).toEqual([]);
-    await page.getByText('US', { exact: true }).click();
+    await page.getByRole('radio', { name: 'US customary units' }).check();
     await expect(page.locator('html')).toHaveAttribute('data-units', 'us');
   });
 
