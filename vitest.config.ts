@@ -8,6 +8,7 @@ export default defineConfig({
   test: {
     testTimeout: 60_000,
     hookTimeout: 120_000,
+    env: { LOG_LEVEL: process.env.LOG_LEVEL ?? 'silent' },
     projects: [
       {
         extends: true,
