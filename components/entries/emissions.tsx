@@ -1,4 +1,4 @@
-import { TableScroll } from '@/components/ui/table-scroll';
+import { RuledTable } from '@/components/ui/ruled-table';
 import type { EntryNames } from '@/lib/entries/entry-names';
 import type { Material } from '@/lib/entries/schema';
 import { Citations } from './citations';
@@ -10,38 +10,25 @@ export function Emissions({ it, names }: { it: Material; names: EntryNames }) {
   return (
     <section aria-labelledby="measured" className="mt-8">
       <h2 id="measured">What has been measured</h2>
-      <TableScroll label="Table of measured emissions">
-        <table className="mt-2 w-full min-w-[34rem] border-collapse">
-          <thead>
-            <tr className="label border-b-2 border-ink text-left">
-              {['Process', 'Quantity', 'Value', 'Conditions and source'].map((head) => (
-                <th key={head} scope="col" className="p-2">
-                  {head}
-                </th>
-              ))}
-            </tr>
-          </thead>
-          <tbody>
-            {emissions.map((each, i) => (
-              <tr key={i} className="border-b border-rule align-top">
-                <th scope="row" className="p-2 text-left align-top font-normal">
-                  {names[`process:${each.process}`] ?? each.process}
-                </th>
-                <td className="p-2">{each.quantity}</td>
-                <td className="p-2">
-                  <span className="figure whitespace-normal">
-                    {each.value} <span className="unit">{each.unit}</span>
-                  </span>
-                </td>
-                <td className="p-2">
-                  {each.conditions}
-                  <Citations ids={[each.source]} sources={it.sources} provenance={each.provenance} note={each.note} />
-                </td>
-              </tr>
-            ))}
-          </tbody>
-        </table>
-      </TableScroll>
+      <RuledTable label="Table of measured emissions" heads={['Process', 'Quantity', 'Value', 'Conditions and source']}>
+        {emissions.map((each, i) => (
+          <tr key={i} className="border-b border-rule align-top">
+            <th scope="row" className="p-2 text-left align-top font-normal">
+              {names[`process:${each.process}`] ?? each.process}
+            </th>
+            <td className="p-2">{each.quantity}</td>
+            <td className="p-2">
+              <span className="figure whitespace-normal">
+                {each.value} <span className="unit">{each.unit}</span>
+              </span>
+            </td>
+            <td className="p-2">
+              {each.conditions}
+              <Citations ids={[each.source]} sources={it.sources} provenance={each.provenance} note={each.note} />
+            </td>
+          </tr>
+        ))}
+      </RuledTable>
     </section>
   );
 }

@@ -1,5 +1,5 @@
 import { Quantity } from '@/components/ui/quantity';
-import { TableScroll } from '@/components/ui/table-scroll';
+import { RuledTable } from '@/components/ui/ruled-table';
 import type { Limit } from '@/lib/entries/schema';
 import { Citations } from './citations';
 
@@ -48,24 +48,11 @@ export function LimitsTable({ limits, sources, note }: { limits: Limit[]; source
       {limits.length === 0 ? (
         <p className="mt-2">No numeric limit is recorded here. That is not permission: it is a gap.</p>
       ) : (
-        <TableScroll label="Table of exposure limits">
-          <table className="mt-2 w-full min-w-[34rem] border-collapse">
-            <thead>
-              <tr className="label border-b-2 border-ink text-left">
-                {['Body', 'Kind', 'Value', 'Source and note'].map((head) => (
-                  <th key={head} scope="col" className="p-2">
-                    {head}
-                  </th>
-                ))}
-              </tr>
-            </thead>
-            <tbody>
-              {limits.map((limit, i) => (
-                <LimitRow key={i} {...{ limit, sources }} />
-              ))}
-            </tbody>
-          </table>
-        </TableScroll>
+        <RuledTable label="Table of exposure limits" heads={['Body', 'Kind', 'Value', 'Source and note']}>
+          {limits.map((limit, i) => (
+            <LimitRow key={i} {...{ limit, sources }} />
+          ))}
+        </RuledTable>
       )}
       {note && <p className="mt-2 max-w-measure">{note}</p>}
       <p className="mt-2 max-w-measure text-quiet">

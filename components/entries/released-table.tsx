@@ -1,6 +1,6 @@
 import Link from 'next/link';
 import { Quantity } from '@/components/ui/quantity';
-import { TableScroll } from '@/components/ui/table-scroll';
+import { RuledTable } from '@/components/ui/ruled-table';
 import type { ReleasedSubstance } from '@/lib/check/check';
 
 type Shown = ReleasedSubstance['limits'][number];
@@ -24,34 +24,21 @@ function Limits({ limits }: { limits: Shown[] }) {
 export function ReleasedTable({ releases }: { releases: ReleasedSubstance[] }) {
   if (releases.length === 0) return <p>No released substance is recorded.</p>;
   return (
-    <TableScroll label="Released substances and their limits">
-      <table className="mt-2 w-full min-w-[34rem] border-collapse">
-        <thead>
-          <tr className="label border-b-2 border-ink text-left">
-            {['Substance', 'CAS', 'Cancer', 'Limits'].map((head) => (
-              <th key={head} scope="col" className="p-2">
-                {head}
-              </th>
-            ))}
-          </tr>
-        </thead>
-        <tbody>
-          {releases.map((each) => (
-            <tr key={each.substance} className="border-b border-rule align-top">
-              <th scope="row" className="p-2 text-left align-top">
-                <Link href={`/substances/${each.substance}`} prefetch={false}>
-                  {each.name}
-                </Link>
-              </th>
-              <td className="figure p-2">{each.cas ?? '—'}</td>
-              <td className="p-2">{each.carcinogen ?? '—'}</td>
-              <td className="p-2">
-                <Limits limits={each.limits} />
-              </td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
-    </TableScroll>
+    <RuledTable label="Released substances and their limits" heads={['Substance', 'CAS', 'Cancer', 'Limits']}>
+      {releases.map((each) => (
+        <tr key={each.substance} className="border-b border-rule align-top">
+          <th scope="row" className="p-2 text-left align-top">
+            <Link href={`/substances/${each.substance}`} prefetch={false}>
+              {each.name}
+            </Link>
+          </th>
+          <td className="figure p-2">{each.cas ?? '—'}</td>
+          <td className="p-2">{each.carcinogen ?? '—'}</td>
+          <td className="p-2">
+            <Limits limits={each.limits} />
+          </td>
+        </tr>
+      ))}
+    </RuledTable>
   );
 }
