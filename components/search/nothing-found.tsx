@@ -11,8 +11,8 @@ export function NothingFound({ q }: { q: string }) {
       </p>
       <ul className="list-disc space-y-1 pl-5">
         <li>
-          A sheet or part without a label: <Link href="/guides/identifying-plastics">identify it</Link> before it meets
-          heat or a blade.
+          A sheet or part without a label: <Link href="/guides/identifying-plastics">find out what it is</Link> before
+          it meets heat or a blade.
         </li>
         <li>
           A trade name: look on its label or safety data sheet for the material or its CAS number, and search for that.

@@ -46,5 +46,5 @@ test('a question with a wrong premise lands on the correcting note', async ({ pa
 
 test('a question that finds nothing says what to do next', async ({ page }) => {
   await page.goto('/search?q=zzzzqqqq');
-  await expect(page.getByRole('link', { name: /unknown|identify/i }).first()).toBeVisible();
+  await expect(page.getByRole('link', { name: /find out what it is/ }).first()).toBeVisible();
 });
