@@ -1,6 +1,7 @@
 import { CaptureFigure } from '@/components/figures/capture-figure';
 import { CautionLine } from '@/components/ui/caution';
 import { show, told } from '@/lib/units/show';
+import { LETTERS } from '@/lib/worksheets/hood-airflow/equations';
 import { tableAddressOf, type Typed } from '@/lib/worksheets/hood-airflow/address';
 import type { HoodQuestion, HoodResult } from '@/lib/worksheets/hood-airflow/schema';
 import type { Answer } from '@/lib/worksheets/worksheet';
@@ -13,6 +14,12 @@ type Props = { typed: Typed; question: HoodQuestion; answer: Answer<HoodResult> 
 
 const LEFT_OUT =
   'This leaves out draughts, people walking by, the pull of the machine itself, and whether a fan and duct can give this much: that is another sum.';
+
+const NOTE = `Worked in metres and seconds; the constants have no unit, so feet and feet per minute give the same. ${Object.entries(
+  LETTERS,
+)
+  .map(([letter, meaning]) => `${letter}: ${meaning}`)
+  .join('. ')}.`;
 
 /** The answer: what to know first, the airflow, the drawing, the numbers and the working. */
 export function HoodAnswer({ typed, question, answer: { result, steps, warnings } }: Props) {
@@ -44,7 +51,7 @@ export function HoodAnswer({ typed, question, answer: { result, steps, warnings 
           />
         }
       />
-      <StepList steps={steps} system={system} />
+      <StepList steps={steps} system={system} note={NOTE} />
     </div>
   );
 }

@@ -1,9 +1,10 @@
 import type { Kind, System } from '@/lib/units/kinds';
 import { figure, told } from '@/lib/units/show';
-import { LETTERS } from '@/lib/worksheets/hood-airflow/equations';
 import type { Step } from '@/lib/worksheets/worksheet';
 
-const KINDS: Record<string, Kind> = { 'm/s': 'velocity', 'm3/s': 'airflow', m: 'length', m2: 'area' };
+const KINDS: Record<string, Kind> = {
+  ...{ 'm/s': 'velocity', 'm3/s': 'airflow', m: 'length', m2: 'area', Pa: 'pressure' },
+};
 
 const valueOf = ({ value, unit }: Step, system: System) => {
   const kind = KINDS[unit];
@@ -25,22 +26,16 @@ function OneStep({ step, system }: { step: Step; system: System }) {
 }
 
 /** The working, line by line, behind one click; on paper it stands open. */
-export function StepList({ steps, system }: { steps: readonly Step[]; system: System }) {
+export function StepList({ steps, system, note }: { steps: readonly Step[]; system: System; note?: string }) {
   return (
     <details>
       <summary className="font-semibold">The working, with the source of each equation</summary>
       <ol className="mt-3 list-decimal space-y-3 pl-6">
-        {steps.map((step) => (
-          <OneStep key={step.label} step={step} system={system} />
+        {steps.map((step, i) => (
+          <OneStep key={`${i} ${step.label}`} step={step} system={system} />
         ))}
       </ol>
-      <p className="mt-3 text-base text-quiet">
-        Worked in metres and seconds; the constants have no unit, so feet and feet per minute give the same.{' '}
-        {Object.entries(LETTERS)
-          .map(([letter, meaning]) => `${letter}: ${meaning}`)
-          .join('. ')}
-        .
-      </p>
+      {note && <p className="mt-3 text-base text-quiet">{note}</p>}
     </details>
   );
 }

@@ -62,6 +62,13 @@ function inflows(room: Room) {
   };
 }
 
+/** All that is let in at a pressure, m3/s at the room's density; negative where more goes out by the ways in. */
+export function letInAt(room: Room, pressure: number): CubicMetresPerSecond {
+  const into = inflows(room);
+  const mass = into.supply(pressure) + into.openings(pressure) + into.leakage(pressure);
+  return (mass / room.indoor) as CubicMetresPerSecond;
+}
+
 /**
  * The pressure of a room, Pa against outdoors at the floor, at which what leaves it equals what is let in, by mass. All exhausts,
  * the supply, the openings and the cracks are solved together: one function that falls as the pressure rises, so one root, between two

@@ -38,6 +38,16 @@ export function parseQuantity(kind: Kind, text: string, system: System, bare = T
   return Number.isFinite(value) ? { ok: true, value } : no('That number is too large.');
 }
 
+/** Reads a typed number that has no unit. */
+export function parsePlain(text: string): Parsed {
+  const typed = text.trim().replace(/^[−–]/, '-');
+  if (typed === '') return no('Write a number.');
+  if (typed.length > MAX_TYPED) return no('That is too long for a number.');
+  if (/\d,\d/.test(typed)) return no('Write a decimal point and no commas: 0.5, 1200.');
+  const value = NUMBER.exec(typed)?.[0] === typed ? Number(typed) : NaN;
+  return Number.isFinite(value) ? { ok: true, value } : no('Write a number, such as 0.3.');
+}
+
 /** A stored value as text for an input, to five significant figures so that a change of units and back returns what was typed. */
 export function typedText(kind: Kind, value: number, system: System, unit = TYPED_UNITS[kind][system]): string {
   return String(Number(inUnit(value, unitOf(kind, unit)).toPrecision(5)));

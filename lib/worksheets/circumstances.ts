@@ -1,4 +1,3 @@
-import { z } from 'zod';
 import type { Warning } from './worksheet';
 
 /** What may be true of a room or of the work in it, and must be answered before any number. */
@@ -14,9 +13,11 @@ export type Circumstance = (typeof CIRCUMSTANCES)[number];
 
 /** How each is asked of the reader. */
 export const CIRCUMSTANCE_WORDS: Record<Circumstance, string> = {
-  'flued-appliance': 'A boiler, water heater, stove or hearth with a flue draws its air from this room or from one open to it',
+  'flued-appliance':
+    'A boiler, water heater, stove or hearth with a flue draws its air from this room or from one open to it',
   'isocyanate-spray': 'Paint, varnish or foam with isocyanates is sprayed',
-  'chlorinated-solvent': 'A chlorinated solvent is about, with an arc, a flame, a glowing wire or an ultraviolet lamp near',
+  'chlorinated-solvent':
+    'A chlorinated solvent is about, with an arc, a flame, a glowing wire or an ultraviolet lamp near',
   combustible: 'Dust, vapour or gas that can burn is given off',
   'carbon-monoxide': 'A carbon monoxide alarm has sounded, or somebody has a headache, dizziness or nausea here',
   'confined-space': 'The work is in a tank, a pit, a duct or another confined space',
@@ -46,13 +47,6 @@ const ORDER: readonly Circumstance[] = [
   'flued-appliance',
   'combustible',
 ];
-
-/** The field of a question that says what is true of the room and the work. */
-export const circumstancesField = z
-  .array(z.enum(CIRCUMSTANCES))
-  .max(CIRCUMSTANCES.length)
-  .optional()
-  .describe('what is true of the room and the work: each leads the answer with a caution');
 
 /** The cautions that must come before the numbers, the worst first; none for none. */
 export const cautionsOf = (given: readonly Circumstance[] = []): Warning[] =>

@@ -1,5 +1,6 @@
 import type { z } from 'zod';
 import { done, type Outcome } from '@/lib/outcome';
+import { NO_FACTS, type LibraryFacts } from './facts';
 import { parseRequest } from './parse-request';
 
 /** One line of the working: what is reckoned, with letters and with numbers, and where the equation is from. `value` is in `unit`. */
@@ -33,23 +34,31 @@ export type Worksheet = About & {
   request: z.ZodType;
   answer: z.ZodType;
   address: z.ZodObject;
-  run: (body: unknown) => Outcome<Answer<unknown>>;
-  table: (address: URLSearchParams) => Outcome<Cell[][]>;
+  /** Whether it cannot answer without the library. */
+  asksLibrary: boolean;
+  run: (body: unknown, facts?: LibraryFacts) => Outcome<Answer<unknown>>;
+  table: (address: URLSearchParams, facts?: LibraryFacts) => Outcome<Cell[][]>;
 };
 
-/** A worksheet from its parts: the schema that admits a question and the function that solves an admitted one. */
+/**
+ * A worksheet from its parts: the schema that admits a question and the function that solves an admitted one, or refuses it (422) where
+ * no schema could have told.
+ */
 export function worksheet<Q, R>(parts: {
   about: About;
   request: z.ZodType<Q>;
   answer: z.ZodType<Answer<R>>;
   address: z.ZodObject;
-  solve: (question: Q) => Answer<R>;
+  solve: (question: Q, facts: LibraryFacts) => Answer<R> | Outcome<Answer<R>>;
   table: Worksheet['table'];
+  asksLibrary?: boolean;
 }): Worksheet {
-  const { about, request, answer, address, solve, table } = parts;
-  const run = (body: unknown) => {
+  const { about, request, answer, address, solve, table, asksLibrary = false } = parts;
+  const run = (body: unknown, facts = NO_FACTS): Outcome<Answer<R>> => {
     const question = parseRequest(request, body);
-    return question.ok ? done(solve(question.value)) : question;
+    if (!question.ok) return question;
+    const solved = solve(question.value, facts);
+    return 'ok' in solved ? solved : done(solved);
   };
-  return { ...about, request, answer, address, run, table };
+  return { ...about, request, answer, address, asksLibrary, run, table };
 }

@@ -1,14 +1,11 @@
 import { done, type Outcome } from '@/lib/outcome';
-import { inUnit, TYPED_UNITS, unitOf, type Kind, type System } from '@/lib/units/kinds';
+import { TYPED_UNITS } from '@/lib/units/kinds';
+import { cell } from '@/lib/worksheets/cells';
 import { parseRequest } from '@/lib/worksheets/parse-request';
 import type { Cell } from '@/lib/worksheets/worksheet';
 import { requestFrom, typedFrom } from './address';
 import { hoodAirflowRequest } from './schema';
 import { solveHoodAirflow } from './solve';
-
-/** A number for a spreadsheet: five figures, in one unit for the whole column. */
-const cell = (kind: Kind, value: number, system: System) =>
-  Number(inUnit(value, unitOf(kind, TYPED_UNITS[kind][system])).toPrecision(5));
 
 /** The contour of the question in an address, as rows for a spreadsheet in the units of the address. */
 export function hoodTable(address: URLSearchParams): Outcome<Cell[][]> {

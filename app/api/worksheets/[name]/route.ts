@@ -1,5 +1,6 @@
 import { handle, readJson } from '@/lib/api/handle';
 import { problem } from '@/lib/api/problem';
+import { factsFor } from '@/lib/search/facts-for';
 import { worksheetNamed } from '@/lib/worksheets/list';
 
 type Context = { params: Promise<{ name: string }> };
@@ -12,7 +13,7 @@ export const POST = handle<Context>('worksheet', async (request, { params }) => 
   const worksheet = worksheetNamed((await params).name);
   if (!worksheet) return missing();
   const body = await readJson(request);
-  const answer = body.ok ? worksheet.run(body.value) : body;
+  const answer = body.ok ? worksheet.run(body.value, await factsFor(worksheet)) : body;
   return answer.ok ? Response.json(answer.value, { headers: { 'cache-control': 'no-store' } }) : problem(answer);
 });
 

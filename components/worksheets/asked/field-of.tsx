@@ -1,0 +1,92 @@
+import { Field } from '@/components/forms/field';
+import { MAX_TYPED } from '@/lib/units/parse-quantity';
+import { typedUnitOf, type ChecksAsk, type ChoiceAsk, type FieldAsk, type RowsAsk } from '@/lib/worksheets/ask/fields';
+import { MAX_KEPT } from '@/lib/worksheets/ask/typed';
+import { fieldId } from '@/components/forms/field-id';
+import { AskedRows } from './rows';
+import type { FormState } from './form-state';
+
+const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
+
+function Choice({ field, path, state, error }: { field: ChoiceAsk; path: string; state: FormState; error?: string }) {
+  return (
+    <Field name={path} label={capital(field.label)} hint={field.help} error={error}>
+      {(control) => (
+        <select {...control} defaultValue={state.typed.texts.get(path)?.[0] ?? ''} className="input">
+          <option value="">{field.first ?? 'Choose'}</option>
+          {field.options.map(({ value, label }) => (
+            <option key={value} value={value}>
+              {label}
+            </option>
+          ))}
+        </select>
+      )}
+    </Field>
+  );
+}
+
+function Checks({ field, path, state }: { field: ChecksAsk; path: string; state: FormState }) {
+  const ticked = state.typed.texts.get(path) ?? [];
+  return (
+    <div id={fieldId(path)}>
+      {field.options.map(({ value, label }) => (
+        <label key={value} className="flex cursor-pointer items-start gap-2 py-1">
+          <input
+            type="checkbox"
+            name={path}
+            value={value}
+            defaultChecked={ticked.includes(value)}
+            className="mt-1.5 size-4 shrink-0 accent-(--link)"
+          />
+          {label}
+        </label>
+      ))}
+    </div>
+  );
+}
+
+type Props = { field: Exclude<FieldAsk, RowsAsk>; path: string; state: FormState };
+
+function Plain({ field, path, state }: Props) {
+  const error = state.faults.find((fault) => fault.path === path)?.message;
+  if (field.as === 'checks') return <Checks {...{ field, path, state }} />;
+  if (field.as === 'choice') return <Choice {...{ field, path, state, error }} />;
+  const unit = field.as === 'number' ? typedUnitOf(field, state.typed.units) : undefined;
+  return (
+    <Field
+      name={path}
+      label={`${capital(field.label)}${unit ? ` (${unit})` : ''}`}
+      hint={field.help}
+      error={error}
+      defaultValue={state.typed.texts.get(path)?.[0]}
+      inputMode={field.as === 'number' ? 'decimal' : undefined}
+      autoComplete="off"
+      maxLength={field.as === 'number' ? MAX_TYPED : MAX_KEPT}
+    />
+  );
+}
+
+/** Fields one after another, rows among them, each with its unit, help and error. */
+export function AskedFields({
+  fields,
+  prefix = '',
+  state,
+}: {
+  fields: readonly FieldAsk[];
+  prefix?: string;
+  state: FormState;
+}) {
+  return fields.map((field) => {
+    const path = `${prefix}${field.path}`;
+    const wide = field.as === 'rows' || field.as === 'checks';
+    return (
+      <div key={field.path} className={wide ? 'sm:col-span-2' : 'min-w-0'}>
+        {field.as === 'rows' ? (
+          <AskedRows {...{ rows: field, prefix, state }} />
+        ) : (
+          <Plain {...{ field, path, state }} />
+        )}
+      </div>
+    );
+  });
+}

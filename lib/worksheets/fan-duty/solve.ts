@@ -1,0 +1,81 @@
+import type { Air } from '@/lib/air/air-density';
+import { systemLoss, type DuctSystem } from '@/lib/air/duct-system';
+import type { Fan } from '@/lib/air/fan-curve';
+import { meetingOf, speedFor, type Meeting } from '@/lib/air/operating-point';
+import { done, refuse, type Outcome } from '@/lib/outcome';
+import { cubicMetresPerSecond, kilogramsPerCubicMetre } from '@/lib/units/quantity';
+import { airOf, systemOf } from '@/lib/worksheets/duct-system';
+import { cautionsOf } from '@/lib/worksheets/circumstances';
+import { fanFrom } from '@/lib/worksheets/fan';
+import type { Answer } from '@/lib/worksheets/worksheet';
+import { shareOf } from './branches';
+import type { FanDutyQuestion, FanDutyResult } from './schema';
+import { fanDutyWarnings } from './warnings';
+import { fanDutySteps } from './working';
+
+const SHOWN = 40;
+
+export type Solved = { fan: Fan; system: DuctSystem; air: Air; meeting: Meeting; loaded?: Meeting };
+
+const pressureAt =
+  (system: DuctSystem, air: Air, room: number, loaded = false) =>
+  (q: number) =>
+    systemLoss(system, cubicMetresPerSecond(q), air, loaded).staticPressure - room;
+
+function curvesOf({ fan, system, air, meeting }: Solved, room: number): FanDutyResult['curves'] {
+  const end = Math.max(fan.end, (meeting.crossings.at(-1)?.airflow ?? 0) * 1.1);
+  const flows = Array.from({ length: SHOWN + 1 }, (_, i) => (end * i) / SHOWN);
+  const drawn = (at: (q: number) => number) => flows.map((airflow) => ({ airflow, staticPressure: at(airflow) }));
+  return { fan: drawn(fan.pressureAt), system: drawn(pressureAt(system, air, room)) };
+}
+
+const refused = () =>
+  refuse(422, 'No meeting', 'The fan never meets its system: at no airflow does it give the pressure that is asked.', [
+    {
+      path: 'fan.curve',
+      message: 'never reaches the pressure that hood, duct and room ask for: there is no airflow to answer with',
+    },
+  ]);
+
+/**
+ * Where a fan meets its system, with the speed for a wanted airflow and, for several machines, each one's share. SI in, SI out.
+ * @param question admitted by `fanDutyRequest`; refuses (422) where the curves never cross
+ */
+export function solveFanDuty(question: FanDutyQuestion): Outcome<Answer<FanDutyResult>> {
+  const named = airOf(question.air);
+  const air = question.density === undefined ? named : { ...named, density: kilogramsPerCubicMetre(question.density) };
+  const [fan, system, room] = [fanFrom(question.fan, air.density), systemOf(question), question.roomPressure ?? 0];
+  const several = question.branches && question.branches.length > 0;
+  const shared = several ? shareOf(question, fan, air) : undefined;
+  const meeting = shared
+    ? {
+        crossings: [shared.network],
+        beyond: shared.network.airflow > fan.end,
+        stall: shared.network.airflow < fan.peak.airflow,
+      }
+    : meetingOf(fan, pressureAt(system, air, room));
+  const [first] = meeting.crossings;
+  if (!first) return refused();
+  const hasLoaded = question.filter?.loaded !== undefined && !several;
+  const loaded = hasLoaded ? meetingOf(fan, pressureAt(system, air, room, true)) : undefined;
+  const solved: Solved = { fan, system, air, meeting, loaded };
+  const { targetAirflow: target } = question;
+  const speed =
+    target === undefined || several
+      ? undefined
+      : (speedFor(fanFrom({ ...question.fan, speed: 1 }, air.density), target, pressureAt(system, air, room)(target)) ??
+        null);
+  const result: FanDutyResult = {
+    ...{ airflow: first.airflow, staticPressure: first.staticPressure },
+    ...(speed === undefined ? {} : { speedForAirflow: speed }),
+    ...(loaded?.crossings[0] ? { loadedFilter: loaded.crossings[0] } : {}),
+    crossings: meeting.crossings.map(({ airflow, staticPressure }) => ({ airflow, staticPressure })),
+    curves: curvesOf(solved, room),
+    ...(shared ? { branches: shared.shares } : {}),
+  };
+  return done({
+    result,
+    steps: fanDutySteps(question, solved, result),
+    warnings: [...cautionsOf(question.circumstances), ...fanDutyWarnings(question, solved, result)],
+  });
+}

@@ -1,0 +1,62 @@
+import { airChanges } from '@/lib/air/air-changes';
+import { makeUpHeat } from '@/lib/air/make-up-heat';
+import { openingFor } from '@/lib/air/orifice';
+import { balanceRoom, letInAt, type Room } from '@/lib/air/room-balance';
+import { VENT_KINDS } from '@/lib/air/vent-limits';
+import { celsius, cubicMetres, cubicMetresPerSecond } from '@/lib/units/quantity';
+import { cautionsOf } from '@/lib/worksheets/circumstances';
+import type { Answer } from '@/lib/worksheets/worksheet';
+import { fluesOf } from './flues';
+import { roomOf } from './room';
+import type { RoomBalanceQuestion, RoomBalanceResult } from './schema';
+import { roomBalanceWarnings } from './warnings';
+import { roomBalanceSteps } from './working';
+
+/** How far below outdoors a room without a flue may be before its doors are hard to open, Pa: common practice, no source. */
+export const COMFORT_LIMIT = -5;
+
+/** The limit that the room is held to: of its most delicate appliance, or of its doors. */
+export const strictestLimit = ({ appliances = [] }: RoomBalanceQuestion) =>
+  Math.max(COMFORT_LIMIT, ...appliances.map(({ vent }) => VENT_KINDS[vent].limit));
+
+/** Free opening, m2, that would let in what is lacking at the strictest limit: what leaves there less what comes in there. */
+function openingNeeded(room: Room, pressure: number, limit: number): number | null {
+  if (pressure >= limit) return null;
+  const leaves = room.exhausts.reduce((sum, exhaust) => sum + exhaust.airflowAt(limit), 0);
+  const lacking = Math.max(0, leaves - letInAt(room, limit));
+  const outdoors = cubicMetresPerSecond((lacking * room.indoor) / room.outdoor);
+  return openingFor(outdoors, -limit, room.outdoor);
+}
+
+/**
+ * The pressure a room comes to with every exhaust on, what each then gets, and whether a flue is beaten: all solved together.
+ * SI in, SI out. @param question admitted by `roomBalanceRequest`
+ */
+export function solveRoomBalance(question: RoomBalanceQuestion): Answer<RoomBalanceResult> {
+  const room = roomOf(question);
+  const balance = balanceRoom(room);
+  const { pressure, exhausts, supply, openings, leakage } = balance;
+  const leaves = exhausts.reduce((sum: number, { airflow }) => sum + airflow, 0);
+  const wanted = exhausts.reduce((sum: number, each) => sum + each.wanted, 0);
+  const { indoor, outdoor } = question.air;
+  const total = supply + openings + leakage;
+  const result: RoomBalanceResult = {
+    roomPressure: pressure,
+    exhausts: exhausts.map(({ name, airflow, wanted: asked }) => ({ name, airflow, wanted: asked })),
+    makeUp: { supply, openings, leakage, total },
+    shortfall: Math.max(0, wanted - leaves),
+    airChangesPerHour: airChanges(cubicMetresPerSecond(Math.max(0, leaves)), cubicMetres(question.room.volume)),
+    appliances: fluesOf(question, pressure),
+    heat: makeUpHeat(cubicMetresPerSecond(Math.max(0, total)), room.indoor, celsius(indoor), celsius(outdoor)),
+    openingNeeded: openingNeeded(room, pressure, strictestLimit(question)),
+  };
+  return {
+    result,
+    steps: roomBalanceSteps(question, room, balance, result),
+    warnings: [...cautionsOf(circumstancesOf(question)), ...roomBalanceWarnings(question, result)],
+  };
+}
+
+/** A flued appliance that is told of leads with its caution, ticked or not. */
+const circumstancesOf = ({ circumstances = [], appliances = [] }: RoomBalanceQuestion) =>
+  appliances.length > 0 ? [...circumstances, 'flued-appliance' as const] : circumstances;
