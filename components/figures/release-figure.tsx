@@ -1,5 +1,6 @@
 import { scaleLog } from 'd3-scale';
 import { figure } from '@/lib/units/show';
+import { limitWords } from '@/lib/worksheets/limit-words';
 import type { ReleaseResult } from '@/lib/worksheets/release/schema';
 import { FigureFrame, FRAME } from './figure-frame';
 import { FigureText } from './figure-text';
@@ -27,7 +28,7 @@ export function ReleaseFigure({ result }: { result: ReleaseResult }) {
           heads={['Substance', 'mg/m³ at most', 'ppm at most', 'Limit', 'Times']}
           rows={held.map(({ name, concentrationAtMost, ppmAtMost, limit, ofLimit }) => [
             ...[name, figure(concentrationAtMost?.value ?? 0), figure(ppmAtMost ?? 0)],
-            ...[limit ? `${limit.authority} ${limit.basis} ${limit.value} ${limit.unit}` : '', figure(ofLimit)],
+            ...[limit ? limitWords(limit) : '', figure(ofLimit)],
           ])}
         />
       }

@@ -1,11 +1,6 @@
-import type {
-  CubicMetres,
-  CubicMetresPerSecond,
-  MilligramsPerCubicMetre,
-  MilligramsPerSecond,
-} from '@/lib/units/quantity';
+import type { CubicMetres, CubicMetresPerSecond } from '@/lib/units/quantity';
 import { airChanges } from './air-changes';
-import { aboveZero, finite, fromZeroUp } from './domain';
+import { finite, fromZeroUp } from './domain';
 
 /**
  * Clean air that a filter gives: its airflow times the share it holds back, m3/s. It counts for particles, or for gases, never both.
@@ -18,32 +13,21 @@ export function cleanAir(airflow: CubicMetresPerSecond, efficiency: number): Cub
   return (airflow * efficiency) as CubicMetresPerSecond;
 }
 
-/** Air changes an hour that a cleaner stands for: 3600 CADR / V. */
+/** Air changes an hour that a cleaner stands for: 3600 CADR / V. Source: CDC, MMWR 1994;43(RR-13). @throws as `airChanges` */
 export const equivalentAirChanges = (clean: CubicMetresPerSecond, volume: CubicMetres) => airChanges(clean, volume);
 
 /**
- * Concentration that a room with ventilation, a cleaner and settling comes to: C = G / (Q + CADR + k V), mg/m3.
- * Source: mass balance; no published worked value was found.
- * @param settling share of the room's air that settles clean, 1/s
+ * All that clears a room, as one airflow: Q + CADR + k V, m3/s. What stands side by side adds up (CDC, MMWR 1994;43(RR-13)). Build-up,
+ * decay and the steady concentration take it for their airflow. Source: mass balance; no published worked value was found.
+ * @param settling what falls out or decays by itself, as a share of the room's air, 1/s
+ * @throws RangeError for a negative or endless amount
  */
-export function concentrationWithCleaner(
-  generation: MilligramsPerSecond,
+export function clearingAirflow(
   ventilation: CubicMetresPerSecond,
   clean: CubicMetresPerSecond,
   volume: CubicMetres,
   settling = 0,
-): MilligramsPerCubicMetre {
-  fromZeroUp({ generation, ventilation, clean, volume, settling });
-  const removed = ventilation + clean + settling * volume;
-  aboveZero({ removed });
-  return finite(generation / removed) as MilligramsPerCubicMetre;
+): CubicMetresPerSecond {
+  fromZeroUp({ ventilation, clean, volume, settling });
+  return finite(ventilation + clean + settling * volume) as CubicMetresPerSecond;
 }
-
-/** Vapour a bed of carbon holds when full: w m, in the unit of the mass. Source: carbon capacity as share of weight. */
-export function carbonHolds(mass: number, capacity: number): number {
-  fromZeroUp({ mass, capacity });
-  return finite(mass * capacity);
-}
-
-/** How much of the theoretical life is used in practice. Source: a laboratory-hood maker's article, about one third. */
-export const PRACTICAL_SHARE = 1 / 3;

@@ -26,7 +26,9 @@ const substanceFact = (title: string, { formula, molarMass, limits }: Substance)
   ...{ title, formula, molarMass },
   limits: limits
     .filter(({ supersededBy }) => supersededBy === undefined)
-    .map(({ authority, basis, value, unit, source }) => ({ authority, basis, value, unit, source })),
+    .map(({ authority, basis, value, unit, source, provenance }) => ({
+      ...{ authority, basis, value, unit, source, provenance },
+    })),
 });
 
 /** What the library tells a worksheet: compositions, and the limits in force. */

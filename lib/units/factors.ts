@@ -27,3 +27,5 @@ export const INCH_OF_MERCURY = 13595.1 * STANDARD_GRAVITY * INCH; // Pa
 
 /** Standard air of the US trade, 0.075 lb/ft3. Source: ASHRAE and ACGIH usage, 1.2014 kg/m3. */
 export const STANDARD_AIR = 0.075 * POUND_PER_CUBIC_FOOT; // kg/m3
+/** An hour, s. */
+export const HOUR = 3600;

@@ -1,5 +1,12 @@
 /** A limit in force of a substance, as a worksheet needs it. */
-export type LimitFact = { authority: string; basis: string; value: number; unit: string; source: string };
+export type LimitFact = {
+  authority: string;
+  basis: string;
+  value: number;
+  unit: string;
+  source: string;
+  provenance: string;
+};
 
 /** What a worksheet may ask of the library. Densities in g/cm3; `share` of a part, 0 to 1, the most that is stated. */
 export type MaterialFact = {

@@ -18,6 +18,10 @@ const PAGES = [
   '/worksheets',
   '/worksheets/hood-airflow',
   '/worksheets/hood-airflow?hood=flanged-opening&velocity=0.5&distance=0.3&diameter=0.2',
+  '/worksheets/duct-pressure?airflow=500&hood.entryLossFactor=0.5&runs.0.duct=flexible-slack&runs.0.diameter=125&runs.0.length=8',
+  '/worksheets/room-balance?room.volume=62&air.indoor=20&air.outdoor=2&exhausts.0.name=laser&exhausts.0.airflow=576&makeUp.leakage.ach50=6&appliances.0.name=heater&appliances.0.vent=natural-draught',
+  '/worksheets/clearing-time?volume=52&airflow=1000&removal=0.99',
+  '/worksheets/release?material=pvc&massLost=2&room.volume=60',
   '/about',
   '/materials/no-such-thing',
 ];

@@ -12,7 +12,13 @@ const STORED = [
   '/materials/no-such-thing',
   '/no/such/page',
 ];
-const ASKED = ['/library', '/search?q=pvc', '/check?material=pvc&process=laser-cutting', '/worksheets/hood-airflow'];
+const ASKED = [
+  '/library',
+  '/search?q=pvc',
+  '/check?material=pvc&process=laser-cutting',
+  '/worksheets/hood-airflow',
+  '/worksheets/fan-duty',
+];
 
 for (const path of [...STORED, ...ASKED])
   test(`${path} carries a policy that names every script it runs, and runs them`, async ({ page }) => {

@@ -2,7 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { airChanges, airflowOfChanges } from '@/lib/air/air-changes';
 import { concentrationAfter } from '@/lib/air/build-up';
 import { remaining, timeUntil } from '@/lib/air/decay';
-import { effectiveAirflow, evaporationAirflow } from '@/lib/air/dilution';
+import { evaporationAirflow } from '@/lib/air/evaporation';
+import { effectiveAirflow } from '@/lib/air/mixing';
 import { fromCfm, toCfm } from '@/lib/units/convert';
 import { CUBIC_FOOT } from '@/lib/units/factors';
 import {

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { airflowOfChanges } from '@/lib/air/air-changes';
-import { carbonHolds, cleanAir, equivalentAirChanges } from '@/lib/air/cleaner';
+import { carbonHolds } from '@/lib/air/carbon';
+import { cleanAir, equivalentAirChanges } from '@/lib/air/cleaner';
 import { fromCfm, toCfm } from '@/lib/units/convert';
 import { CUBIC_FOOT } from '@/lib/units/factors';
 import { cubicMetres } from '@/lib/units/quantity';

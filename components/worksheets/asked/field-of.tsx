@@ -78,7 +78,7 @@ export function AskedFields({
 }) {
   return fields.map((field) => {
     const path = `${prefix}${field.path}`;
-    const wide = field.as === 'rows' || field.as === 'checks';
+    const wide = field.as === 'rows' || field.as === 'checks' || (field.help?.length ?? 0) > 60;
     return (
       <div key={field.path} className={wide ? 'sm:col-span-2' : 'min-w-0'}>
         {field.as === 'rows' ? (

@@ -7,7 +7,35 @@ import type { FormState } from './form-state';
 
 type Props = { rows: RowsAsk; prefix: string; state: FormState };
 
+const withArticle = (word: string) => `${/^[aeiou]/.test(word) ? 'an' : 'a'} ${word}`;
 const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
+
+type RowProps = { rows: RowsAsk; path: string; number: number; removable: boolean; state: FormState };
+
+/** One of them; where there are only two fields to it they stand in one line. */
+function Row({ rows, path, number, removable, state }: RowProps) {
+  const short = rows.fields.length <= 2;
+  return (
+    <fieldset className="border border-rule bg-surface p-3">
+      <legend className="label px-1">
+        {capital(rows.one)} {number}
+      </legend>
+      <div className={short ? 'grid items-end gap-3 sm:grid-cols-[1fr_1fr_auto]' : 'grid gap-3 sm:grid-cols-2'}>
+        <AskedFields fields={rows.fields} prefix={`${path}.`} state={state} />
+        {removable && (
+          <div className={`no-print ${short ? '' : 'sm:col-span-2'}`}>
+            <Button type="submit" name="remove" value={path} onClick={state.onRow} formNoValidate>
+              Take away{' '}
+              <span className={short ? 'sr-only' : ''}>
+                {rows.one} {number}
+              </span>
+            </Button>
+          </div>
+        )}
+      </div>
+    </fieldset>
+  );
+}
 
 /** Alike things, a box each, with buttons that add one or take one away: with scripts at once, without them by sending the form. */
 export function AskedRows({ rows, prefix, state }: Props) {
@@ -20,33 +48,12 @@ export function AskedRows({ rows, prefix, state }: Props) {
       {rows.help && <p className="text-base text-quiet">{rows.help}</p>}
       {error && <p className="text-base font-semibold text-kiln">{error}</p>}
       {Array.from({ length: count }, (_, i) => (
-        <fieldset key={i} className="border border-rule bg-surface p-3">
-          <legend className="label px-1">
-            {capital(rows.one)} {i + 1}
-          </legend>
-          <div className="grid gap-3 sm:grid-cols-2">
-            <AskedFields fields={rows.fields} prefix={`${path}.${i}.`} state={state} />
-          </div>
-          {count > rows.min && (
-            <div className="no-print mt-3">
-              <Button
-                type="submit"
-                variant="plain"
-                name="remove"
-                value={`${path}.${i}`}
-                onClick={state.onRow}
-                formNoValidate
-              >
-                Take away {rows.one} {i + 1}
-              </Button>
-            </div>
-          )}
-        </fieldset>
+        <Row key={i} {...{ rows, state }} path={`${path}.${i}`} number={i + 1} removable={count > rows.min} />
       ))}
       {count < rows.max && (
         <div className="no-print">
           <Button type="submit" variant="plain" name="add" value={path} onClick={state.onRow} formNoValidate>
-            Add a {rows.one}
+            Add {withArticle(rows.one)}
           </Button>
         </div>
       )}

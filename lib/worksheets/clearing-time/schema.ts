@@ -1,10 +1,9 @@
 import { z } from 'zod';
 import { answerOf } from '@/lib/worksheets/answer-schema';
 import { circumstancesField } from '@/lib/worksheets/circumstances-schema';
-import { mixingFactor } from '@/lib/worksheets/dilution/schema';
-import { airflow, volume } from '@/lib/worksheets/parts-schema';
+import { above, mixingFactor } from '@/lib/worksheets/dilution/schema';
+import { airflow, between, MAX_AIRFLOW, volume } from '@/lib/worksheets/parts-schema';
 
-const above = (max: number) => z.number().gt(0, 'must be above 0').max(max, `must be at most ${max}`);
 export const MODES = { removal: ['removal'], between: ['from', 'to'], source: ['massRate', 'duration'] } as const;
 
 export const clearingTimeRequest = z
@@ -12,7 +11,14 @@ export const clearingTimeRequest = z
     volume,
     airflow,
     mixingFactor: mixingFactor.optional(),
-    removal: z.number().gt(0, 'must be above 0').lt(1, 'must be below 1: nothing is ever wholly gone').optional(),
+    cleanAir: between('airflow', 0, MAX_AIRFLOW)
+      .optional()
+      .describe('m3/s that a filter gives besides (CADR), of what is to be cleared'),
+    removal: z
+      .number()
+      .gt(0, 'must be above 0')
+      .max(1 - 1e-9, 'must be below 1: nothing is ever wholly gone')
+      .optional(),
     from: above(1e9).optional().describe('concentration, in the unit of `to`'),
     to: above(1e9).optional().describe('concentration to reach; mg/m3 after a source'),
     massRate: above(1e7).optional().describe('mg/s while it ran'),
@@ -40,14 +46,17 @@ export const clearingTimeRequest = z
   .meta({ id: 'ClearingTimeRequest', examples: [{ volume: 52, airflow: 0.2778, mixingFactor: 3, removal: 0.99 }] });
 export type ClearingTimeQuestion = z.infer<typeof clearingTimeRequest>;
 
-const curve = z.array(z.strictObject({ time: z.number().describe('s'), fraction: z.number() }));
+const point = z.strictObject({ time: z.number().describe('s from the end of any source'), fraction: z.number() });
 export const clearingTimeResult = z.strictObject({
   time: z.number().describe('s until it is reached, from the end of any source'),
-  airChanges: z.number().describe('an hour'),
-  curve: curve.describe('share of the concentration at the start, or of the highest after a source'),
-  curvePerfect: curve.describe('the same with K = 1'),
-  perfectMixing: z.number().describe('s with K = 1'),
+  airChanges: z.number().describe('an hour, of the airflow alone'),
+  equivalentAirChanges: z.number().optional().describe('an hour, with what a filter gives'),
+  curve: z.array(point).describe('share of the concentration at the start, or of the highest after a source'),
+  curvePerfect: z.array(point).describe('the same from the same start with K = 1'),
+  perfectMixing: z.number().describe('s with K = 1 from the same start'),
   peak: z.number().optional().describe('mg/m3 at the end of the source'),
+  steady: z.number().optional().describe('mg/m3 that the source would come to if it never ended'),
+  buildUp: z.array(point).optional().describe('share of the highest while the source ran; its times are negative'),
 });
 export type ClearingTimeResult = z.infer<typeof clearingTimeResult>;
 export const clearingTimeAnswer = answerOf(clearingTimeResult).meta({ id: 'ClearingTimeAnswer' });

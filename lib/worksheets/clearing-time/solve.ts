@@ -1,115 +1,62 @@
 import { airChanges } from '@/lib/air/air-changes';
-import { concentrationAfter } from '@/lib/air/build-up';
-import { remaining, timeUntil } from '@/lib/air/decay';
-import { cubicMetres, cubicMetresPerSecond, milligramsPerSecond, seconds } from '@/lib/units/quantity';
-import { cautionsOf } from '@/lib/worksheets/circumstances';
-import { n, step } from '@/lib/worksheets/steps';
-import type { Answer, Step, Warning } from '@/lib/worksheets/worksheet';
+import { steadyConcentration } from '@/lib/air/build-up';
+import { equivalentAirChanges } from '@/lib/air/cleaner';
+import { timeUntil } from '@/lib/air/decay';
+import { cubicMetresPerSecond, milligramsPerSecond } from '@/lib/units/quantity';
+import { n } from '@/lib/worksheets/steps';
+import type { Answer } from '@/lib/worksheets/worksheet';
+import { buildUpOf, concentrationOf, decayOf, roomOf, type Room } from './room';
 import type { ClearingTimeQuestion, ClearingTimeResult } from './schema';
+import { clearingWarnings } from './warnings';
+import { clearingSteps, type Goal } from './working';
 
-const CDC = 'CDC, MMWR 1994;43(RR-13), Table S3-1';
-const ACGIH = 'ACGIH Industrial Ventilation, 24th ed. (2001), ch. 2';
-const POINTS = 60;
 /** What a room is cleared to where nothing is said after a source: common practice, no source. */
 export const CLEARED = 0.01;
+/** How much more than the time asked for is drawn. */
+const SHOWN = 1.25;
 
-type Room = { airflow: ReturnType<typeof cubicMetresPerSecond>; volume: ReturnType<typeof cubicMetres> };
-
-/** The highest after a source, mg/m3, with the same mixing all the while. */
-const peakOf = ({ massRate, duration = 0 }: ClearingTimeQuestion, room: Room, mixing: number) =>
-  massRate === undefined
-    ? undefined
-    : concentrationAfter({ generation: milligramsPerSecond(massRate), mixing, ...room }, seconds(duration));
-
-/** The share that is left when it counts as clear. */
-function shareOf({ removal, from, to }: ClearingTimeQuestion, peak?: number): number {
-  if (removal !== undefined) return 1 - removal;
-  if (from !== undefined) return (to ?? 0) / from;
-  return to === undefined || peak === undefined ? CLEARED : Math.min(1, to / peak);
+/** The share that is left when it counts as clear: all of it where a source never came so high. */
+function goalOf({ removal, from, to }: ClearingTimeQuestion, peak: number): Goal {
+  if (removal !== undefined) return { share: 1 - removal, equation: `1 − removal = 1 − ${removal}`, isChosen: false };
+  if (to === undefined) return { share: CLEARED, equation: 'a hundredth of the highest', isChosen: true };
+  const start = from ?? peak;
+  return {
+    share: to < start ? to / start : 1,
+    equation: `to / from = ${n(to)} / ${n(start)}, at most 1`,
+    isChosen: false,
+  };
 }
 
-const curveOf = (end: number, room: Room, mixing: number) =>
-  Array.from({ length: POINTS + 1 }, (_, i) => {
-    const time = seconds((end * i) / POINTS);
-    return { time, fraction: remaining(room.airflow, room.volume, time, mixing) };
-  });
-
-function stepsOf(question: ClearingTimeQuestion, mixing: number, share: number, result: ClearingTimeResult): Step[] {
-  const { airflow, volume, massRate, duration = 0 } = question;
-  return [
-    step('Air changes an hour', `n = 3600 Q / V = 3600 × ${n(airflow)} / ${n(volume)}`, result.airChanges, '1/h', CDC),
-    ...(result.peak === undefined
-      ? []
-      : [
-          step(
-            'Concentration when the source stops',
-            `C = (G K / Q)(1 − e^(−Q t / (K V))), G = ${n(massRate!)} mg/s, t = ${n(duration)} s`,
-            result.peak,
-            'mg/m3',
-            ACGIH,
-          ),
-        ]),
-    step(
-      'Share that is left when clear',
-      question.removal === undefined ? 'to / from' : '1 − removal',
-      share,
-      '',
-      'As given',
-    ),
-    step(
-      'Time until clear',
-      `t = −K (V / Q) ln(share) = −${n(mixing)} × (${n(volume)} / ${n(airflow)}) × ln(${n(share)})`,
-      result.time,
-      's',
-      `${CDC}; ${ACGIH}`,
-    ),
-    step('With perfect mixing', `t / K = ${n(result.time)} / ${n(mixing)}`, result.perfectMixing, 's', CDC),
-  ];
+/** What a source that ran for a while has left, with how it rose; nothing where none ran. */
+function sourceOf({ massRate, duration }: ClearingTimeQuestion, room: Room, shown: number) {
+  if (massRate === undefined || duration === undefined) return {};
+  return {
+    peak: concentrationOf(room, massRate, duration),
+    steady: steadyConcentration({ generation: milligramsPerSecond(massRate), ...room }),
+    buildUp: buildUpOf(room, duration, shown),
+  };
 }
-
-const WARNINGS: readonly Warning[] = [
-  {
-    code: 'planning-only',
-    text: 'This is for planning. A smoke test in the room itself, with its filters at their worst, finds the time that is posted and kept.',
-  },
-  {
-    code: 'source-must-stop',
-    text: 'It clears only once nothing gives off any more: wet paint, a cooling part, a bin of hot offcuts go on.',
-  },
-  {
-    code: 'unseen',
-    text: 'Neither a clear view nor the nose tells that a room has cleared. Masks stay on until the time is over.',
-  },
-];
 
 /**
  * How long a room takes to clear; with perfect mixing, and a warning, where no factor is given. SI in, SI out.
- * @param question admitted by `clearingTimeRequest`
+ * @param question admitted by `clearingTimeRequest`; sources of the equations stand in lib/air and in the steps
  */
 export function solveClearingTime(question: ClearingTimeQuestion): Answer<ClearingTimeResult> {
-  const mixing = question.mixingFactor ?? 1;
-  const room: Room = { airflow: cubicMetresPerSecond(question.airflow), volume: cubicMetres(question.volume) };
-  const peak = peakOf(question, room, mixing);
-  const share = shareOf(question, peak);
-  const time = timeUntil(share, room.airflow, room.volume, mixing);
-  const shown = time > 0 ? time * 1.25 : (room.volume / room.airflow) * mixing;
+  const { airflow, cleanAir = 0, massRate = 0, duration = 0 } = question;
+  const room = roomOf(question);
+  const goal = goalOf(question, concentrationOf(room, massRate, duration));
+  const time = timeUntil(goal.share, room.airflow, room.volume, room.mixing);
+  const shown = time > 0 ? time * SHOWN : (room.mixing * room.volume) / room.airflow;
   const result: ClearingTimeResult = {
-    ...{ time, airChanges: airChanges(room.airflow, room.volume), perfectMixing: time / mixing },
-    ...{ curve: curveOf(shown, room, mixing), curvePerfect: curveOf(shown, room, 1) },
-    ...(peak === undefined ? {} : { peak }),
+    ...{ time, airChanges: airChanges(cubicMetresPerSecond(airflow), room.volume) },
+    ...(cleanAir > 0 ? { equivalentAirChanges: equivalentAirChanges(room.airflow, room.volume) } : {}),
+    ...{ curve: decayOf(room, shown), curvePerfect: decayOf({ ...room, mixing: 1 }, shown) },
+    perfectMixing: time / room.mixing,
+    ...sourceOf(question, room, shown),
   };
-  const assumed: Warning[] =
-    mixing === 1
-      ? [
-          {
-            code: 'perfect-mixing',
-            text: 'Reckoned with perfect mixing, which no room has: with a factor of 3 it takes three times as long, and corners longer.',
-          },
-        ]
-      : [];
   return {
     result,
-    steps: stepsOf(question, mixing, share, result),
-    warnings: [...cautionsOf(question.circumstances), ...assumed, ...WARNINGS],
+    steps: clearingSteps(question, room, goal, result),
+    warnings: clearingWarnings(question, result, goal),
   };
 }

@@ -1,10 +1,12 @@
 import { z } from 'zod';
-import { MIXING } from '@/lib/air/dilution';
+import { MIXING } from '@/lib/air/mixing';
 import { answerOf } from '@/lib/worksheets/answer-schema';
 import { circumstancesField } from '@/lib/worksheets/circumstances-schema';
 import { plain } from '@/lib/worksheets/parts-schema';
 
-const above = (max: number) => z.number().gt(0, 'must be above 0').max(max, `must be at most ${max}`);
+/** Smaller than any amount that could be meant. */
+export const LEAST = 1e-9;
+export const above = (max: number) => plain(LEAST, max);
 export const molarMass = z.number().min(1, 'must be at least 1').max(2000, 'must be at most 2000').describe('g/mol');
 export const mixingFactor = plain(MIXING.best, MIXING.worst).describe(
   'K: 1 perfect, 10 very poor; it multiplies the airflow',

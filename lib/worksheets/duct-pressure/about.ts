@@ -29,7 +29,7 @@ function rows(
 /** The duct worksheet. */
 export const ductPressure = askedWorksheet({
   about: {
-    title: 'What does a duct ask of its fan?',
+    title: 'How much pressure does a duct cost?',
     question:
       'I want this much air through this pipe, with these bends. How much pressure must the fan give, and how fast does it go?',
     summary:

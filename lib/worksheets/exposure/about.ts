@@ -1,4 +1,5 @@
 import { askedWorksheet } from '@/lib/worksheets/ask/asked-worksheet';
+import { limitWords } from '@/lib/worksheets/limit-words';
 import type { Cell } from '@/lib/worksheets/worksheet';
 import { exposureAsk } from './ask';
 import { exposureAnswer, exposureRequest, type ExposureResult } from './schema';
@@ -7,7 +8,7 @@ import { solveExposure } from './solve';
 const rows = ({ items, sum }: ExposureResult): Cell[][] => [
   ['Substance', 'Limit', 'Share of the limit'],
   ...items.map(({ substance, limit, ratio }): Cell[] => [
-    ...[substance, `${limit.authority} ${limit.basis} ${limit.value} ${limit.unit}`, Number(ratio.toPrecision(5))],
+    ...[substance, limitWords(limit), Number(ratio.toPrecision(5))],
   ]),
   ['Sum', '', Number(sum.toPrecision(5))],
 ];

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { answerOf } from '@/lib/worksheets/answer-schema';
 import { circumstancesField } from '@/lib/worksheets/circumstances-schema';
+import { limitSchema } from '@/lib/worksheets/limit-schema';
 
 export const MAX_ITEMS = 12;
 export const BASES = ['TWA', 'STEL', 'ceiling', 'IDLH'] as const;
@@ -33,13 +34,7 @@ export const exposureResult = z.strictObject({
     z.strictObject({
       substance: z.string(),
       ratio: z.number(),
-      limit: z.strictObject({
-        authority: z.string(),
-        basis: z.string(),
-        value: z.number(),
-        unit: z.string(),
-        source: z.string(),
-      }),
+      limit: limitSchema,
     }),
   ),
   within: z.boolean().describe('whether the sum is at most 1: a statement about the sum, not about harm'),

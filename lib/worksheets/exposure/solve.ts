@@ -4,6 +4,7 @@ import { done, refuse, type FieldFault, type Outcome } from '@/lib/outcome';
 import { gramsPerMole } from '@/lib/units/quantity';
 import { cautionsOf } from '@/lib/worksheets/circumstances';
 import type { LibraryFacts, LimitFact, SubstanceFact } from '@/lib/worksheets/facts';
+import { limitWords } from '@/lib/worksheets/limit-words';
 import { n, step } from '@/lib/worksheets/steps';
 import type { Answer, Step, Warning } from '@/lib/worksheets/worksheet';
 import type { ExposureQuestion, ExposureResult } from './schema';
@@ -74,7 +75,7 @@ function stepsOf(judged: readonly Judged[], sum: number): Step[] {
         `C / L = ${n(mass)} / ${n(limitMass)}`,
         mass / limitMass,
         '',
-        `${limit.authority} ${limit.basis} ${n(limit.value)} ${limit.unit}: ${limit.source}`,
+        `${limitWords(limit)}: ${limit.source}`,
       ),
     ),
     step(

@@ -1,4 +1,5 @@
 import { askedWorksheet } from '@/lib/worksheets/ask/asked-worksheet';
+import { limitWords } from '@/lib/worksheets/limit-words';
 import type { Cell } from '@/lib/worksheets/worksheet';
 import { releaseAsk } from './ask';
 import { releaseAnswer, releaseRequest, type ReleaseResult } from './schema';
@@ -9,7 +10,7 @@ const rows = ({ releases }: ReleaseResult): Cell[][] => [
   ['Substance', 'Mass at most (g)', 'Concentration at most (mg/m3)', 'ppm at most', 'Limit', 'Times the limit'],
   ...releases.map(({ name, massAtMost, concentrationAtMost, ppmAtMost, limit, ofLimit }): Cell[] => [
     ...[name, five(massAtMost), five(concentrationAtMost?.value), five(ppmAtMost)],
-    ...[limit ? `${limit.authority} ${limit.basis} ${limit.value} ${limit.unit}` : '', five(ofLimit)],
+    ...[limit ? limitWords(limit) : '', five(ofLimit)],
   ]),
 ];
 

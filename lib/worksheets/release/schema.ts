@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { MAX_FORMULA } from '@/lib/chemistry/formula';
 import { answerOf } from '@/lib/worksheets/answer-schema';
 import { circumstancesField } from '@/lib/worksheets/circumstances-schema';
+import { limitSchema } from '@/lib/worksheets/limit-schema';
 import { airflow, between, plain, volume } from '@/lib/worksheets/parts-schema';
 
 const slug = z
@@ -38,14 +39,6 @@ export const releaseRequest = z
   });
 export type ReleaseQuestion = z.infer<typeof releaseRequest>;
 
-const limit = z.strictObject({
-  authority: z.string(),
-  basis: z.string(),
-  value: z.number(),
-  unit: z.string(),
-  source: z.string(),
-});
-
 export const releaseResult = z.strictObject({
   massLost: z.number().describe('g'),
   elements: z.array(
@@ -62,7 +55,7 @@ export const releaseResult = z.strictObject({
         .describe('all at once, evenly in the room'),
       ppmAtMost: z.number().optional().describe('at 25 °C'),
       ofLimit: z.number().optional().describe('times the limit'),
-      limit: limit.optional().describe('the strictest short one in force, or else of a shift'),
+      limit: limitSchema.optional().describe('the strictest short one in force, or else of a shift'),
       timeToLimit: z
         .number()
         .optional()

@@ -2,6 +2,7 @@ import { kerfMass, molarMassOfFormula } from '@/lib/chemistry/release';
 import { done, refuse, type Outcome } from '@/lib/outcome';
 import { cautionsOf } from '@/lib/worksheets/circumstances';
 import type { LibraryFacts } from '@/lib/worksheets/facts';
+import { limitWords } from '@/lib/worksheets/limit-words';
 import { GEOMETRY, n, step } from '@/lib/worksheets/steps';
 import type { Answer, Step } from '@/lib/worksheets/worksheet';
 import { inRoom, productsOf, type Product } from './releases';
@@ -57,15 +58,7 @@ function roomSteps({ room }: ReleaseQuestion, { releases }: ReleaseResult): Step
         ]
       : []),
     ...(limit
-      ? [
-          step(
-            `${name} against its limit`,
-            `C / limit, ${limit.authority} ${limit.basis} ${n(limit.value)} ${limit.unit}`,
-            ofLimit!,
-            '',
-            limit.source,
-          ),
-        ]
+      ? [step(`${name} against its limit`, `C / limit, ${limitWords(limit)}`, ofLimit!, '', limit.source)]
       : []),
   ]);
 }

@@ -1,6 +1,7 @@
 import Link from 'next/link';
 import { RuledTable } from '@/components/ui/ruled-table';
 import { figure } from '@/lib/units/show';
+import { limitWords } from '@/lib/worksheets/limit-words';
 import type { ExposureResult } from '@/lib/worksheets/exposure/schema';
 import type { ResultProps } from '../answer';
 
@@ -25,7 +26,7 @@ export function ExposureView({ result }: ResultProps<ExposureResult>) {
                 {substance.replaceAll('-', ' ')}
               </Link>
             </th>
-            <td className="p-2">{`${limit.authority} ${limit.basis} ${limit.value} ${limit.unit}`}</td>
+            <td className="p-2">{limitWords(limit)}</td>
             <td className="figure p-2">{figure(ratio)}</td>
           </tr>
         ))}

@@ -2,6 +2,7 @@ import Link from 'next/link';
 import { ReleaseFigure } from '@/components/figures/release-figure';
 import { RuledTable } from '@/components/ui/ruled-table';
 import { figure } from '@/lib/units/show';
+import { limitWords } from '@/lib/worksheets/limit-words';
 import type { ReleaseResult } from '@/lib/worksheets/release/schema';
 import type { ResultProps } from '../answer';
 
@@ -33,7 +34,7 @@ export function ReleaseView({ result }: ResultProps<ReleaseResult>) {
             <td className="figure p-2">
               {concentrationAtMost ? `${figure(concentrationAtMost.value)} mg/m³ (${figure(ppmAtMost ?? 0)} ppm)` : '—'}
             </td>
-            <td className="p-2">{limit ? `${limit.authority} ${limit.basis} ${limit.value} ${limit.unit}` : '—'}</td>
+            <td className="p-2">{limit ? limitWords(limit) : '—'}</td>
             <td className="figure p-2">{ofLimit === undefined ? '—' : figure(ofLimit)}</td>
           </tr>
         ))}
