@@ -16,6 +16,9 @@ export default function WorksheetsPage() {
         Each answers one question, shows its working, and says where it ends. The question stands in the address, so it
         can be kept or passed on.
       </p>
+      <p className="mt-3">
+        <Link href="/workshops">Describe a workshop of your own</Link>, and each check is held against it.
+      </p>
       <ul className="mt-6 max-w-measure space-y-5">
         {WORKSHEETS.map(({ name, title, question, summary }) => (
           <li key={name} className="panel">

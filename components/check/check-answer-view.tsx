@@ -6,6 +6,7 @@ import { ControlLine } from '@/components/ui/control-line';
 import { Panel } from '@/components/ui/panel';
 import { PrintLine } from '@/components/ui/print-line';
 import { SourceList } from '@/components/ui/source-list';
+import { CopePanel } from '@/components/workshops/cope-panel';
 import type { CheckView } from '@/lib/search/ask-check';
 import { AnswerCapture } from './answer-capture';
 import { AnswerReasons } from './answer-reasons';
@@ -57,6 +58,7 @@ export function CheckAnswerView({ view }: { view: CheckView }) {
         </section>
       )}
       <AnswerCapture view={view} />
+      <CopePanel materials={answer.materials} process={answer.process} />
       <Cautions cautions={answer.cautions} />
       {materials.map((it) => (
         <OtherMaterials key={it.title} it={it} names={names} />

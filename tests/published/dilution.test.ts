@@ -98,12 +98,13 @@ const rows: Row[] = [
   row('T6-21', '1 change an hour, 10 min', built(1, 10), 0.1535, 6e-5, REFERENCE),
   row('T6-23', '2 changes an hour, 40 min', built(2, 40), 0.3682, 6e-5, REFERENCE),
   row('T6-25', '8 changes an hour, 10 min', built(8, 10), 0.0921, 6e-5, REFERENCE),
+  // 387 ft³ a pound-mole, and a pint of 1.0432 lb of water: 403.7; the trade prints 403. Ours at a million parts is that volume itself.
   row(
     'T6-36',
-    '387 ft3 a pound-mole on water, a pint',
-    387 * (PINT * 0.998 * 2.2046226),
-    403,
-    1.5,
+    'a pint a minute of a liquid like water with a molar mass of 1, in cfm of vapour',
+    toCfm(evaporationAirflow(PINT / 60, 1, gramsPerMole(1), 1e6)),
+    387 * 1.0432,
+    1,
     'NRC training page (387); University of Toledo formula sheet (403)',
   ),
 ];

@@ -5,8 +5,10 @@ import { clearingTimeAnswer, clearingTimeRequest, type ClearingTimeResult } from
 import { solveClearingTime } from './solve';
 
 const five = (value: number) => Number(value.toPrecision(5));
-const rows = ({ curve, curvePerfect }: ClearingTimeResult): Cell[][] => [
+/** A row a point; the times while a source ran are below 0. */
+const rows = ({ buildUp = [], curve, curvePerfect }: ClearingTimeResult): Cell[][] => [
   ['Time (s)', 'Share left', 'Share left, perfect mixing'],
+  ...buildUp.filter(({ time }) => time < 0).map(({ time, fraction }): Cell[] => [five(time), five(fraction), '']),
   ...curve.map(({ time, fraction }, i): Cell[] => [five(time), five(fraction), five(curvePerfect[i]!.fraction)]),
 ];
 

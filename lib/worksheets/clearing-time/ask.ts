@@ -11,10 +11,17 @@ export const clearingTimeAsk: Ask = {
         { path: 'volume', as: 'number', kind: 'volume', label: 'volume' },
         { path: 'airflow', as: 'number', kind: 'airflow', label: 'airflow through it' },
         {
+          path: 'cleanAir',
+          as: 'number',
+          kind: 'airflow',
+          label: 'clean air of a filter (CADR)',
+          help: 'Only for what that filter holds back. Leave empty without one.',
+        },
+        {
           path: 'mixingFactor',
           as: 'number',
           label: 'mixing factor K',
-          help: '1 is perfect and never met; 3 ordinary; up to 10 very poor.',
+          help: '1 is perfect, which no room has; as high as 10 where air moves very poorly (CDC, 1994). Where other tables have a share of at most 1, do not type it here.',
         },
       ],
     },

@@ -45,7 +45,7 @@ export function buildUpOf(room: Room, duration: number, shown: number): Curve {
   const back = Math.min(duration, shown);
   const peak = concentrationOf(room, 1, duration);
   return Array.from({ length: POINTS + 1 }, (_, i) => {
-    const time = (back * i) / POINTS - back;
-    return { time, fraction: concentrationOf(room, 1, Math.max(0, duration + time)) / peak };
+    const before = back * (1 - i / POINTS);
+    return { time: 0 - before, fraction: concentrationOf(room, 1, duration - before) / peak };
   });
 }

@@ -4,8 +4,6 @@ import { circumstancesField } from '@/lib/worksheets/circumstances-schema';
 import { above, mixingFactor } from '@/lib/worksheets/dilution/schema';
 import { airflow, between, MAX_AIRFLOW, volume } from '@/lib/worksheets/parts-schema';
 
-export const MODES = { removal: ['removal'], between: ['from', 'to'], source: ['massRate', 'duration'] } as const;
-
 export const clearingTimeRequest = z
   .strictObject({
     volume,

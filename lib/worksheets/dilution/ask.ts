@@ -35,7 +35,7 @@ export const dilutionAsk: Ask = {
           path: 'mixingFactor',
           as: 'number',
           label: 'mixing factor K',
-          help: '1 is perfect and never met; 3 ordinary; up to 10 very poor.',
+          help: '1 is perfect, which no room has; as high as 10 where air moves very poorly (CDC, 1994). Where other tables have a share of at most 1, do not type it here.',
         },
       ],
     },

@@ -1,0 +1,116 @@
+import { airflowOf, type HoodName } from '@/lib/air/hood-airflow';
+import { timeUntil } from '@/lib/air/decay';
+import { cubicMetres, cubicMetresPerSecond, metres, metresPerSecond } from '@/lib/units/quantity';
+import { hoodOf } from '@/lib/worksheets/hood-airflow/hood';
+import { FIELDS_OF } from '@/lib/worksheets/hood-airflow/fields';
+import { hoodAirflowRequest } from '@/lib/worksheets/hood-airflow/schema';
+import { solveRoomBalance } from '@/lib/worksheets/room-balance/solve';
+import type { Plan, PlanStation } from './plan-schema';
+import { exhaustNamed, roomNamed, roomQuestion } from './room-question';
+
+/** What a pair asks of a station: its control, and the velocity at the source, m/s, where one is stated. */
+export type Need = {
+  control: 'general ventilation' | 'local exhaust' | 'enclosed exhaust' | 'prohibited' | 'unknown';
+  velocity?: { min: number; max: number };
+};
+
+/** All airflows m3/s. `share` is delivered over needed. */
+export type Measured = {
+  needed: number;
+  delivered: number;
+  alone: number;
+  share: number;
+  roomPressure: number;
+  spills: string[];
+  clearing: number;
+  assumptions: string[];
+};
+export type Coped =
+  | { verdict: 'prohibited'; why: string }
+  | { verdict: 'unknown'; why: string }
+  | { verdict: 'cannot be judged'; why: string[] }
+  | ({ verdict: 'meets' | 'falls short' } & Measured);
+
+/** To what share of the air a room is cleared in the time told, and with what mixing: common practice, no source. */
+const CLEARED = 0.01;
+const MIXING = 3;
+const ENCLOSURE: readonly HoodName[] = ['enclosure'];
+
+/** The airflow this station's own hood needs for a velocity, m3/s, or what its description lacks. */
+export function neededAirflow(station: PlanStation, velocity: number): { airflow: number } | { lacks: string[] } {
+  const { hood, distance, diameter, width, height, openArea, perimeter } = station;
+  if (!hood) return { lacks: [`What hood ${station.name ?? 'the station'} has is missing.`] };
+  const sizes = Object.entries({ distance, diameter, width, height, openArea, perimeter }).filter(
+    ([field, value]) => value !== undefined && (FIELDS_OF[hood] as readonly string[]).includes(field),
+  );
+  const admitted = hoodAirflowRequest.safeParse({ hood, velocity, ...Object.fromEntries(sizes) });
+  if (!admitted.success)
+    return {
+      lacks: admitted.error.issues.map(
+        ({ path, message }) => `Hood of ${station.name ?? 'the station'}: ${path.join('.')} ${message}.`,
+      ),
+    };
+  return { airflow: airflowOf(hoodOf(admitted.data), metresPerSecond(velocity), metres(distance ?? 0)) };
+}
+
+function stopped(station: PlanStation, { control, velocity }: Need): Coped | undefined {
+  if (control === 'prohibited') return { verdict: 'prohibited', why: 'No airflow makes a prohibited pair acceptable.' };
+  if (control === 'unknown')
+    return { verdict: 'unknown', why: 'What is not identified is not run, whatever the airflow.' };
+  if (control === 'general ventilation')
+    return {
+      verdict: 'cannot be judged',
+      why: [
+        'General ventilation is judged by what is given off and not by a hood: reckon it with the dilution worksheet.',
+      ],
+    };
+  if (control === 'enclosed exhaust' && station.hood && !ENCLOSURE.includes(station.hood))
+    return {
+      verdict: 'cannot be judged',
+      why: [
+        'This pair needs an enclosure under suction. The hood of this station is open, and no airflow makes it one.',
+      ],
+    };
+  if (!velocity)
+    return {
+      verdict: 'cannot be judged',
+      why: ['No capture velocity is stated for this pair, so there is nothing to hold the airflow against.'],
+    };
+  return undefined;
+}
+
+/**
+ * Whether a station of a workshop has the air that a pair needs: its own hood's need at the highest stated velocity, against what its
+ * exhaust delivers with everything in its room on, all solved together.
+ * @returns prohibited stays prohibited; what is missing is told
+ */
+export function cope(plan: Plan, station: PlanStation, need: Need): Coped {
+  const before = stopped(station, need);
+  if (before) return before;
+  const exhaust = exhaustNamed(plan, station.exhaust);
+  if (!exhaust)
+    return {
+      verdict: 'cannot be judged',
+      why: [`${station.name ?? 'The station'} is at no exhaust that is described.`],
+    };
+  const room = roomNamed(plan, exhaust.room);
+  if (!room)
+    return { verdict: 'cannot be judged', why: [`The room of ${exhaust.name ?? 'the exhaust'} is not described.`] };
+  const [all, alone] = [roomQuestion(plan, room), roomQuestion(plan, room, (each) => each === exhaust)];
+  const needed = neededAirflow(station, need.velocity!.max);
+  const lacks = [...('lacks' in needed ? needed.lacks : []), ...alone.gaps];
+  if (!all.value || !alone.value || alone.value.exhausts.length === 0 || 'lacks' in needed)
+    return { verdict: 'cannot be judged', why: [...lacks, ...(all.value ? [] : all.gaps)] };
+  const [together, by] = [solveRoomBalance(all.value).result, solveRoomBalance(alone.value).result];
+  const delivered = together.exhausts.find(({ name }) => name === alone.value!.exhausts[0]!.name)?.airflow ?? 0;
+  const leaves = together.exhausts.reduce((sum, { airflow }) => sum + Math.max(0, airflow), 0);
+  const measured: Measured = {
+    ...{ needed: needed.airflow, delivered, alone: by.exhausts[0]!.airflow, share: delivered / needed.airflow },
+    roomPressure: together.roomPressure,
+    spills: together.appliances.filter(({ spills }) => spills).map(({ name }) => name),
+    clearing:
+      leaves > 0 ? timeUntil(CLEARED, cubicMetresPerSecond(leaves), cubicMetres(room.volume!), MIXING) : Infinity,
+    assumptions: [...new Set([...all.assumptions, ...all.gaps])],
+  };
+  return { verdict: measured.share >= 1 ? 'meets' : 'falls short', ...measured };
+}
