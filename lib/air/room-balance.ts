@@ -22,7 +22,9 @@ export type Room = {
   height?: Metres;
 };
 
-/** All airflows in m3/s at the room's density, in is positive; `residual` kg/s that the balance is off by. */
+/** All airflows in m3/s at the room's density, in is positive; `residual` kg/s that the balance is off by, `largest` kg/s of
+ * the largest flow in it: air may come in below and go out above.
+ */
 export type Balance = {
   pressure: Pascals;
   exhausts: { name: string; airflow: CubicMetresPerSecond; wanted: CubicMetresPerSecond }[];
@@ -30,6 +32,7 @@ export type Balance = {
   openings: CubicMetresPerSecond;
   leakage: CubicMetresPerSecond;
   residual: number;
+  largest: number;
 };
 
 /** A supply fan of unknown curve gives way as a stated exhaust does. */
@@ -59,6 +62,7 @@ function inflows(room: Room) {
     supply: (pressure: number) => outdoor * suppliedAt(supply, pressure),
     openings: (pressure: number) => ways.reduce((sum, way) => sum + way(pressure), 0),
     leakage: (pressure: number) => (leakage ? mean(pressure) : 0),
+    largest: (pressure: number) => Math.max(0, ...ways.map((way) => Math.abs(way(pressure)))),
   };
 }
 
@@ -95,5 +99,6 @@ export function balanceRoom(room: Room): Balance {
     openings: volume(into.openings(pressure)),
     leakage: volume(into.leakage(pressure)),
     residual: excess(pressure),
+    largest: Math.max(into.largest(pressure), Math.abs(taken(pressure)), into.supply(pressure)),
   };
 }
