@@ -3,6 +3,7 @@ import { z } from 'zod';
 import { WORKSHEETS } from '@/lib/worksheets/list';
 import { entryPaths } from './openapi-entries';
 import { json, notModified, refusals } from './openapi-parts';
+import { workshopPaths } from './openapi-workshops';
 import { liveSchema, worksheetListSchema } from './schemas';
 
 const worksheetOperation = ({ name, title, summary, request, answer }: (typeof WORKSHEETS)[number]) =>
@@ -77,5 +78,5 @@ export const openApi = () =>
         'What workshop materials give off, the control each pair of material and process needs, and the arithmetic of air. SI on the wire.',
     },
     servers: [{ url: '/' }],
-    paths: { ...entryPaths, ...worksheetPaths(), ...documentPath, ...healthPaths },
+    paths: { ...entryPaths, ...worksheetPaths(), ...workshopPaths, ...documentPath, ...healthPaths },
   });

@@ -8,6 +8,7 @@ import { GET as table } from '@/app/api/worksheets/[name]/table.csv/route';
 import { GET as described } from '@/app/api/openapi.json/route';
 import { MAX_JSON_BYTES } from '@/lib/api/handle';
 import { HOODS } from '@/lib/air/hood-airflow';
+import { WORKSHEETS } from '@/lib/worksheets/list';
 import { NUMBERS } from '@/lib/worksheets/hood-airflow/fields';
 
 const AT = 'http://localhost/api/worksheets';
@@ -153,11 +154,12 @@ describe('the description of the API', () => {
   it('covers every route there is in this slice', async () => {
     const { document, paths } = await operations();
     expect(document.openapi).toBe('3.1.0');
-    expect(paths.sort()).toEqual([
+    const all = [
       ...['/api/check', '/api/entries', '/api/entries/{kind}/{slug}', '/api/health/live', '/api/health/ready'],
-      ...['/api/openapi.json', '/api/search', '/api/worksheets', '/api/worksheets/hood-airflow'],
-      '/api/worksheets/hood-airflow/table.csv',
-    ]);
+      ...['/api/openapi.json', '/api/search', '/api/workshops/cope', '/api/workshops/matrix', '/api/worksheets'],
+      ...WORKSHEETS.flatMap(({ name }) => [`/api/worksheets/${name}`, `/api/worksheets/${name}/table.csv`]),
+    ];
+    expect(paths.sort()).toEqual(all.sort());
   });
 
   it('points only at schemas it holds', async () => {

@@ -22,6 +22,7 @@ const PAGES = [
   '/worksheets/room-balance?room.volume=62&air.indoor=20&air.outdoor=2&exhausts.0.name=laser&exhausts.0.airflow=576&makeUp.leakage.ach50=6&appliances.0.name=heater&appliances.0.vent=natural-draught',
   '/worksheets/clearing-time?volume=52&airflow=1000&removal=0.99',
   '/worksheets/release?material=pvc&massLost=2&room.volume=60',
+  '/workshops',
   '/about',
   '/materials/no-such-thing',
 ];

@@ -18,6 +18,7 @@ const ASKED = [
   '/check?material=pvc&process=laser-cutting',
   '/worksheets/hood-airflow',
   '/worksheets/fan-duty',
+  '/workshops',
 ];
 
 for (const path of [...STORED, ...ASKED])
