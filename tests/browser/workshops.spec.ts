@@ -13,8 +13,9 @@ test('a visitor builds a workshop on a phone, asks about a pair, sees why it fal
   await page.goto('/workshops');
   await page.getByLabel('Name of the workshop').fill('Garden shed');
   await page.getByRole('button', { name: 'Next' }).click();
-  await page.getByLabel('Name', { exact: true }).fill('shed');
-  await page.getByLabel('Volume (m³)').fill('40');
+  const room = page.getByRole('group', { name: 'Room 1' });
+  await room.getByLabel('Name', { exact: true }).fill('shed');
+  await room.getByLabel('Volume (m³)').fill('40');
   await page.getByRole('button', { name: 'Next' }).click();
   const exhaust = page.getByRole('group', { name: 'Exhaust 1' });
   await exhaust.getByLabel('Name', { exact: true }).fill('bench fan');
