@@ -41,6 +41,15 @@ async function successOfSearch() {
     );
 }
 
+async function airSums() {
+  const { airSpeed } = await import('./bench/air-speed.mjs');
+  const { rows, ratio } = airSpeed();
+  console.log('Sums of air, solves a second, and how the time grows with the size (1 is linear):');
+  for (const { name, speed, growth } of rows)
+    console.log(`  ${name}: ${Math.round(speed)}   (grows ${Number(growth.toPrecision(2))} for each time larger)`);
+  console.log(`  the duct against a plain hand-written loop of the same Colebrook: ${times(ratio)} its time`);
+}
+
 async function runningWebsite() {
   const base = process.env.BENCH_BASE_URL;
   if (!base) return console.log('A running website: not measured, BENCH_BASE_URL is not set.');
@@ -58,5 +67,6 @@ await command(async () => {
   await searchAgainstMiniSearch();
   await searchAgainstDatabase();
   await successOfSearch();
+  await airSums();
   await runningWebsite();
 });

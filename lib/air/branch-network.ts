@@ -4,6 +4,7 @@ import type { Air } from './air-density';
 import { areaOfDuct, systemLoss, type DuctSystem } from './duct-system';
 import { withoutHump, type Fan } from './fan-curve';
 import { findRoot } from './find-root';
+import { systemPressure } from './system-pressure';
 import { velocityPressure } from './velocity-pressure';
 
 /** What a shut gate lets through, as a share of the duct's area: common practice, no source. */
@@ -47,19 +48,17 @@ export type NetworkAnswer = {
 
 /** What a branch loses at an airflow; a shut gate is a crack that its air goes through. */
 export function branchLossAt({ system, open, leak = GATE_LEAK }: Branch, air: Air): (airflow: number) => number {
-  const first = areaOfDuct(system.runs[0]!.diameter);
-  return (q) => {
-    const duct = systemLoss(system, q as CubicMetresPerSecond, air).staticPressure;
-    if (open) return duct;
-    const crack = (q / (CRACK * leak * first)) as MetresPerSecond;
-    return duct + velocityPressure(crack, air.density);
-  };
+  const duct = systemPressure(system, air);
+  if (open) return duct;
+  const crack = CRACK * leak * areaOfDuct(system.runs[0]!.diameter);
+  return (q) => duct(q) + velocityPressure((q / crack) as MetresPerSecond, air.density);
 }
 
 /** What the common duct loses: its air already moves, so of its "hood" only what is lost counts, and not the velocity pressure. */
-const mainLossAt = (main: DuctSystem, air: Air) => (q: number) => {
-  const loss = systemLoss(main, q as CubicMetresPerSecond, air);
-  return loss.staticPressure - loss.runs[0]!.velocityPressure;
+const mainLossAt = (main: DuctSystem, air: Air) => {
+  const duct = systemPressure(main, air);
+  const first = areaOfDuct(main.runs[0]!.diameter);
+  return (q: number) => duct(q) - velocityPressure((q / first) as MetresPerSecond, air.density);
 };
 
 /**

@@ -3,14 +3,15 @@
  * wrong number.
  */
 export function fromZeroUp(amounts: Record<string, number>): void {
-  for (const [name, amount] of Object.entries(amounts))
-    if (!Number.isFinite(amount) || amount < 0) throw new RangeError(`${name} must be a finite number from 0 up`);
+  for (const name in amounts) {
+    const amount = amounts[name]!;
+    if (!(amount >= 0 && amount < Infinity)) throw new RangeError(`${name} must be a finite number from 0 up`);
+  }
 }
 
 export function aboveZero(amounts: Record<string, number>): void {
   fromZeroUp(amounts);
-  for (const [name, amount] of Object.entries(amounts))
-    if (amount === 0) throw new RangeError(`${name} must be above 0`);
+  for (const name in amounts) if (amounts[name] === 0) throw new RangeError(`${name} must be above 0`);
 }
 
 /** The amount itself, unless the arithmetic overran what a double holds: then a RangeError and not Infinity or no number. */

@@ -1,9 +1,10 @@
 import type { CubicMetresPerSecond, Pascals } from '@/lib/units/quantity';
 import type { Air } from './air-density';
 import { airflowThrough } from './airflow-through';
-import { systemLoss, type DuctSystem } from './duct-system';
+import type { DuctSystem } from './duct-system';
 import { withoutHump, type Fan } from './fan-curve';
 import { findRisingRoot } from './find-root';
+import { systemPressure } from './system-pressure';
 
 /** Something that takes air out of a room. `airflowAt` its pressure against outdoors, Pa: it never falls as that rises. */
 export type Exhaust = {
@@ -32,7 +33,7 @@ export const statedExhaust = (name: string, airflow: CubicMetresPerSecond): Exha
  */
 export function fanExhaust(name: string, fan: Fan, system: DuctSystem, air: Air, loaded = false): Exhaust {
   const cautious = withoutHump(fan);
-  const lossAt = (q: number) => systemLoss(system, q as CubicMetresPerSecond, air, loaded).staticPressure;
+  const lossAt = systemPressure(system, air, loaded);
   const shutOff = cautious.pressureAt(0);
   const airflowAt = (pressure: number) => {
     const over = shutOff + pressure;

@@ -21,6 +21,7 @@ const branches: FieldAsk = {
 
 export const fanDutyAsk: Ask = {
   name: 'fan-duty',
+  parts: ['hood'],
   groups: [
     circumstances,
     { title: 'The fan', fields: [curveAsk, speedAsk] },

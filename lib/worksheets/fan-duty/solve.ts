@@ -1,7 +1,8 @@
 import type { Air } from '@/lib/air/air-density';
-import { systemLoss, type DuctSystem } from '@/lib/air/duct-system';
+import type { DuctSystem } from '@/lib/air/duct-system';
 import type { Fan } from '@/lib/air/fan-curve';
 import { meetingOf, speedFor, type Meeting } from '@/lib/air/operating-point';
+import { systemPressure } from '@/lib/air/system-pressure';
 import { done, refuse, type Outcome } from '@/lib/outcome';
 import { cubicMetresPerSecond, kilogramsPerCubicMetre } from '@/lib/units/quantity';
 import { airOf, systemOf } from '@/lib/worksheets/duct-system';
@@ -17,10 +18,10 @@ const SHOWN = 40;
 
 export type Solved = { fan: Fan; system: DuctSystem; air: Air; meeting: Meeting; loaded?: Meeting };
 
-const pressureAt =
-  (system: DuctSystem, air: Air, room: number, loaded = false) =>
-  (q: number) =>
-    systemLoss(system, cubicMetresPerSecond(q), air, loaded).staticPressure - room;
+const pressureAt = (system: DuctSystem, air: Air, room: number, loaded = false) => {
+  const asked = systemPressure(system, air, loaded);
+  return (q: number) => asked(q) - room;
+};
 
 function curvesOf({ fan, system, air, meeting }: Solved, room: number): FanDutyResult['curves'] {
   const end = Math.max(fan.end, (meeting.crossings.at(-1)?.airflow ?? 0) * 1.1);

@@ -5,6 +5,7 @@ import { lossFactorOf, runLoss, systemLoss, type DuctRun, type DuctSystem } from
 import { DUCTS } from '@/lib/air/duct-kind';
 import { FITTINGS, fittingOf } from '@/lib/air/fitting';
 import { compressionFactor } from '@/lib/air/flexible-compression';
+import { systemPressure } from '@/lib/air/system-pressure';
 import { cubicMetresPerSecond, metres, pascals } from '@/lib/units/quantity';
 
 const real = (min: number, max: number) => fc.double({ min, max, noNaN: true, noDefaultInfinity: true });
@@ -45,6 +46,18 @@ describe('a duct system', () => {
         expect(systemLoss(system, at(0), ROOM_AIR).staticPressure).toBe(0);
       }),
       { numRuns: 1500 },
+    );
+  });
+
+  it('asks the same of a solver as in its parts, to the last digits', () => {
+    fc.assert(
+      fc.property(systems, real(1e-6, 3), fc.boolean(), (system, q, loaded) => {
+        const { staticPressure } = systemLoss(system, at(q), ROOM_AIR, loaded);
+        expect(Math.abs(systemPressure(system, ROOM_AIR, loaded)(q) - staticPressure)).toBeLessThanOrEqual(
+          1e-12 * staticPressure,
+        );
+      }),
+      { numRuns: 500 },
     );
   });
 
