@@ -4,7 +4,7 @@ import { figure } from '@/lib/units/show';
 import { FRAME } from './figure-frame';
 import { FigureText } from './figure-text';
 
-export const MARGIN = { top: 22, right: 18, bottom: 46, left: 58 };
+export const MARGIN = { top: 32, right: 18, bottom: 46, left: 58 };
 export type Scale = ScaleLinear<number, number>;
 
 /** Scales of a plot within the frame, from 0 to a little above the most of each. */

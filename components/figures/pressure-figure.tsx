@@ -25,6 +25,13 @@ function pointsOf({ question, result }: Props): Point[] {
   return rest > 0 ? [...points, { label: 'with filter and outlet', at, lost: lost + rest }] : points;
 }
 
+function textOf({ result: { staticPressure, hoodStaticPressure, loadedStaticPressure }, system }: Props): string {
+  const pressure = (value: number) => told('pressure', value, system);
+  const loaded =
+    loadedStaticPressure === undefined ? '' : `, and ${pressure(loadedStaticPressure)} with the filter loaded`;
+  return `The fan must give ${pressure(staticPressure)}${loaded}; the hood takes ${pressure(hoodStaticPressure)} of it.`;
+}
+
 /** How the pressure that the fan must give grows along the duct. */
 export function PressureFigure(props: Props) {
   const { result, system } = props;
@@ -36,7 +43,7 @@ export function PressureFigure(props: Props) {
   return (
     <FigureFrame
       title="Pressure lost along the duct"
-      text={`The fan must give ${told('pressure', result.staticPressure, system)}; the hood takes ${told('pressure', result.hoodStaticPressure, system)} of it.`}
+      text={textOf(props)}
       note="From the hood to the end. A step is lost at one place, a slope along a run."
       below={
         <NumbersTable

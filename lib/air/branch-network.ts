@@ -55,7 +55,7 @@ export function branchLossAt({ system, open, leak = GATE_LEAK }: Branch, air: Ai
 }
 
 /** What the common duct loses: its air already moves, so of its "hood" only what is lost counts, and not the velocity pressure. */
-const mainLossAt = (main: DuctSystem, air: Air) => {
+export const mainLossAt = (main: DuctSystem, air: Air) => {
   const duct = systemPressure(main, air);
   const first = areaOfDuct(main.runs[0]!.diameter);
   return (q: number) => duct(q) - velocityPressure((q / first) as MetresPerSecond, air.density);

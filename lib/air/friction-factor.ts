@@ -10,8 +10,8 @@ export const colebrookResidual = (inverseRoot: number, reynolds: number, relativ
   inverseRoot + 2 * Math.log10(relativeRoughness / 3.7 + (2.51 * inverseRoot) / reynolds);
 
 /**
- * Friction factor f of turbulent flow by Colebrook: 1/√f = −2 log10(ε/(3.7 D) + 2.51 / (Re √f)), by Newton's method on 1/√f until the
- * equation holds to 1e-12. Source: Colebrook (1939), as ASHRAE Fundamentals (2021), ch. 21, eq. 19.
+ * Friction factor f of turbulent flow by Colebrook: 1/√f = −2 log10(ε/(3.7 D) + 2.51 / (Re √f)), by Newton's method on 1/√f until it
+ * no longer moves: the equation then holds to 1e-12 and better. Source: Colebrook (1939), as ASHRAE Fundamentals (2021), ch. 21, eq. 19.
  * @param reynolds Re, above 0
  * @param relativeRoughness ε/D, at most 1
  * @throws RangeError for a negative or endless amount
@@ -21,10 +21,10 @@ export function colebrook(reynolds: number, relativeRoughness: number): number {
   fromZeroUp({ relativeRoughness });
   let x = Math.max(1, -1.8 * Math.log10((relativeRoughness / 3.7) ** 1.11 + 6.9 / Math.max(reynolds, 7.1)));
   for (let i = 0; i < 60; i += 1) {
-    const residual = colebrookResidual(x, reynolds, relativeRoughness);
-    if (Math.abs(residual) <= 1e-13 * Math.max(1, x)) break;
     const inside = relativeRoughness / 3.7 + (2.51 * x) / reynolds;
-    x -= residual / (1 + (2 * 2.51) / (reynolds * inside * LOG));
+    const step = colebrookResidual(x, reynolds, relativeRoughness) / (1 + (2 * 2.51) / (reynolds * inside * LOG));
+    x -= step;
+    if (Math.abs(step) <= 2 * Number.EPSILON * x) break;
   }
   return 1 / x ** 2;
 }

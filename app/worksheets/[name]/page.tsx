@@ -1,9 +1,9 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
 import { notFound } from 'next/navigation';
-import { EmptyState } from '@/components/ui/empty-state';
 import { AskedAnswer } from '@/components/worksheets/asked/answer';
 import { asks, isAsked } from '@/components/worksheets/asked/live-results';
+import { NoAnswer } from '@/components/worksheets/asked/no-answer';
 import { results } from '@/components/worksheets/asked/results';
 import { WorksheetView } from '@/components/worksheets/asked/worksheet-view';
 import { factsFor } from '@/lib/search/facts-for';
@@ -45,9 +45,9 @@ export default async function WorksheetPage({ params, searchParams }: Props) {
         {asked.state === 'answered' ? (
           <AskedAnswer {...{ ask }} {...asked} Result={results[name]} />
         ) : (
-          <EmptyState title={TITLES[asked.state]}>
+          <NoAnswer typed={asked.typed} title={TITLES[asked.state]}>
             <p>{worksheet.question} Fill in the form; the answer then stands here.</p>
-          </EmptyState>
+          </NoAnswer>
         )}
       </WorksheetView>
     </>

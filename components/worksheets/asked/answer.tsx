@@ -1,6 +1,8 @@
 import { CautionLine } from '@/components/ui/caution';
+import { Notice } from '@/components/ui/notice';
 import type { System } from '@/lib/units/kinds';
 import type { Ask } from '@/lib/worksheets/ask/fields';
+import { isExample } from '@/lib/worksheets/ask/is-example';
 import { paramsOf, type Typed } from '@/lib/worksheets/ask/typed';
 import type { Answer } from '@/lib/worksheets/worksheet';
 import { StepList } from '../step-list';
@@ -25,6 +27,7 @@ export function AskedAnswer({ ask, typed, question, answer: { result, steps, war
   const system = typed.units;
   return (
     <div className="space-y-6">
+      {isExample(ask, typed) && <Notice>Invented example: no such workshop was measured.</Notice>}
       <WarningList warnings={warnings} />
       <Result result={result as never} question={question} system={system} />
       <CautionLine leavesOut={LEFT_OUT} />

@@ -1,11 +1,14 @@
 import { Field } from '@/components/forms/field';
 import { MAX_TYPED } from '@/lib/units/parse-quantity';
-import { typedUnitOf, type ChecksAsk, type ChoiceAsk, type FieldAsk, type RowsAsk } from '@/lib/worksheets/ask/fields';
+import { typedUnitOf, type ChoiceAsk, type FieldAsk, type RowsAsk } from '@/lib/worksheets/ask/fields';
 import { MAX_KEPT } from '@/lib/worksheets/ask/typed';
-import { fieldId } from '@/components/forms/field-id';
-import { AskedRows } from './rows';
 import type { FormState } from './form-state';
+import { AskedRows } from './rows';
+import { CHOOSE, Ticks } from './ticks';
 
+/** Choices are drawn open up to that many; within rows, where space is short, never. */
+const MAX_OPEN = 5;
+const isShort = (field: ChoiceAsk, path: string) => field.options.length <= MAX_OPEN && !/\.\d+\./.test(path);
 const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
 
 function Choice({ field, path, state, error }: { field: ChoiceAsk; path: string; state: FormState; error?: string }) {
@@ -13,7 +16,7 @@ function Choice({ field, path, state, error }: { field: ChoiceAsk; path: string;
     <Field name={path} label={capital(field.label)} hint={field.help} error={error}>
       {(control) => (
         <select {...control} defaultValue={state.typed.texts.get(path)?.[0] ?? ''} className="input">
-          <option value="">{field.first ?? 'Choose'}</option>
+          <option value="">{field.first ?? CHOOSE}</option>
           {field.options.map(({ value, label }) => (
             <option key={value} value={value}>
               {label}
@@ -25,31 +28,12 @@ function Choice({ field, path, state, error }: { field: ChoiceAsk; path: string;
   );
 }
 
-function Checks({ field, path, state }: { field: ChecksAsk; path: string; state: FormState }) {
-  const ticked = state.typed.texts.get(path) ?? [];
-  return (
-    <div id={fieldId(path)}>
-      {field.options.map(({ value, label }) => (
-        <label key={value} className="flex cursor-pointer items-start gap-2 py-1">
-          <input
-            type="checkbox"
-            name={path}
-            value={value}
-            defaultChecked={ticked.includes(value)}
-            className="mt-1.5 size-4 shrink-0 accent-(--link)"
-          />
-          {label}
-        </label>
-      ))}
-    </div>
-  );
-}
-
 type Props = { field: Exclude<FieldAsk, RowsAsk>; path: string; state: FormState };
 
 function Plain({ field, path, state }: Props) {
   const error = state.faults.find((fault) => fault.path === path)?.message;
-  if (field.as === 'checks') return <Checks {...{ field, path, state }} />;
+  if (field.as === 'checks' || (field.as === 'choice' && isShort(field, path)))
+    return <Ticks {...{ field, path, state, error }} label={capital(field.label)} />;
   if (field.as === 'choice') return <Choice {...{ field, path, state, error }} />;
   const unit = field.as === 'number' ? typedUnitOf(field, state.typed.units) : undefined;
   return (

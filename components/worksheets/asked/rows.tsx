@@ -15,6 +15,7 @@ type RowProps = { rows: RowsAsk; path: string; number: number; removable: boolea
 /** One of them; where there are only two fields to it they stand in one line. */
 function Row({ rows, path, number, removable, state }: RowProps) {
   const short = rows.fields.length <= 2;
+  const landing = `#${fieldId(path.replace(/\.\d+$/, ''))}`;
   return (
     <fieldset className="border border-rule bg-surface p-3">
       <legend className="label px-1">
@@ -24,7 +25,7 @@ function Row({ rows, path, number, removable, state }: RowProps) {
         <AskedFields fields={rows.fields} prefix={`${path}.`} state={state} />
         {removable && (
           <div className={`no-print ${short ? '' : 'sm:col-span-2'}`}>
-            <Button type="submit" name="remove" value={path} onClick={state.onRow} formNoValidate>
+            <Button type="submit" name="remove" value={path} formAction={landing} onClick={state.onRow} formNoValidate>
               Take away{' '}
               <span className={short ? 'sr-only' : ''}>
                 {rows.one} {number}
@@ -52,7 +53,11 @@ export function AskedRows({ rows, prefix, state }: Props) {
       ))}
       {count < rows.max && (
         <div className="no-print">
-          <Button type="submit" variant="plain" name="add" value={path} onClick={state.onRow} formNoValidate>
+          <Button
+            {...{ type: 'submit', variant: 'plain', name: 'add', value: path, onClick: state.onRow }}
+            formAction={`#${fieldId(path)}`}
+            formNoValidate
+          >
             Add {withArticle(rows.one)}
           </Button>
         </div>

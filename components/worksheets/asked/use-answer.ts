@@ -1,16 +1,12 @@
 'use client';
 
 import useSWR from 'swr';
-import { useEffect, useState } from 'react';
 import type { FieldFault } from '@/lib/outcome';
 import { faultsForReader } from '@/lib/worksheets/ask/faults';
 import type { Ask } from '@/lib/worksheets/ask/fields';
 import { requestFrom } from '@/lib/worksheets/ask/request';
 import type { Typed } from '@/lib/worksheets/ask/typed';
 import type { Answer } from '@/lib/worksheets/worksheet';
-
-/** How long typing must rest before the question is asked. */
-const REST_MS = 250;
 
 /** What is still missing is no mistake of whoever is typing: it is told apart from what is wrong. */
 type Refused = { faults: FieldFault[]; missing: FieldFault[] };
@@ -40,19 +36,10 @@ const asker =
     return refusedFor(ask, value.errors ?? [{ path: '', message: value.detail }]);
   };
 
-function useRested<T>(value: T): T {
-  const [rested, setRested] = useState(value);
-  useEffect(() => {
-    const timer = setTimeout(() => setRested(value), REST_MS);
-    return () => clearTimeout(timer);
-  }, [value]);
-  return rested;
-}
-
-/** The answer to what is typed, asked of the API once typing rests; nothing is asked before anything was changed. */
+/** The answer to what is typed, asked of the API; nothing is asked before anything was changed. */
 export function useAnswer(ask: Ask, typed: Typed | null): AnswerState {
   const request = typed && requestFrom(ask, typed);
-  const body = useRested(request?.ok ? JSON.stringify(request.value) : null);
+  const body = request?.ok ? JSON.stringify(request.value) : null;
   const { data, error } = useSWR(body, asker(ask), {
     ...{ keepPreviousData: true, revalidateOnFocus: false, revalidateIfStale: false, shouldRetryOnError: false },
   });

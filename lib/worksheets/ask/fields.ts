@@ -20,7 +20,8 @@ export type RowsAsk = Common & { as: 'rows'; one: string; min: number; max: numb
 export type FieldAsk = NumberAsk | ChoiceAsk | ChecksAsk | TextAsk | RowsAsk;
 /** Fields under one heading; `folded` ones are behind a click until one of them is filled in. */
 export type GroupAsk = { title: string; help?: string; folded?: boolean; fields: readonly FieldAsk[] };
-export type Ask = { name: string; groups: readonly GroupAsk[] };
+/** `parts` are the objects that a request always has, even with nothing filled in: only then can it be told what each lacks. */
+export type Ask = { name: string; groups: readonly GroupAsk[]; parts?: readonly string[] };
 
 /** The unit that a bare number in a field has; undefined where it has none. */
 export const typedUnitOf = ({ kind, unit }: NumberAsk, system: System): string | undefined =>
@@ -28,16 +29,37 @@ export const typedUnitOf = ({ kind, unit }: NumberAsk, system: System): string |
 
 export const fieldsOf = (ask: Ask): FieldAsk[] => ask.groups.flatMap(({ fields }) => fields);
 
-/** The field that a dotted path with row numbers leads to, and which row of which rows it is in. */
-export function fieldAt(fields: readonly FieldAsk[], path: string): { field: FieldAsk; rows: string } | undefined {
+/** A field, its full path, and which row of which rows it is in. */
+export type Found = { field: FieldAsk; path: string; rows: string };
+
+const isTick = (field: FieldAsk, path: string) =>
+  field.as === 'checks' && path.startsWith(`${field.path}.`) && /^\d+$/.test(path.slice(field.path.length + 1));
+
+function within(field: RowsAsk, path: string): Found | undefined {
+  const [, index, rest] = /^(\d+)(?:\.(.+))?$/.exec(path.slice(field.path.length + 1)) ?? [];
+  if (index === undefined) return undefined;
+  const place = `${field.one} ${Number(index) + 1}`;
+  if (rest === undefined) return { field, path: field.path, rows: place };
+  const inner = fieldAt(field.fields, rest);
+  return (
+    inner && {
+      field: inner.field,
+      path: `${field.path}.${index}.${inner.path}`,
+      rows: inner.rows ? `${place}, ${inner.rows}` : place,
+    }
+  );
+}
+
+/**
+ * The field that a dotted path with row numbers leads to. One of several ticks leads to them all, and an object that is more than one
+ * field (`hood`) to the first of its fields.
+ */
+export function fieldAt(fields: readonly FieldAsk[], path: string): Found | undefined {
   for (const field of fields) {
-    if (field.path === path) return { field, rows: '' };
-    if (field.as !== 'rows' || !path.startsWith(`${field.path}.`)) continue;
-    const [, index, rest] = /^(\d+)(?:\.(.+))?$/.exec(path.slice(field.path.length + 1)) ?? [];
-    if (index === undefined) continue;
-    const place = `${field.one} ${Number(index) + 1}`;
-    const inner = rest === undefined ? { field, rows: '' } : fieldAt(field.fields, rest);
-    if (inner) return { field: inner.field, rows: inner.rows ? `${place}, ${inner.rows}` : place };
+    if (field.path === path || isTick(field, path)) return { field, path: field.path, rows: '' };
+    const inner = field.as === 'rows' && path.startsWith(`${field.path}.`) ? within(field, path) : undefined;
+    if (inner) return inner;
   }
-  return undefined;
+  const first = fields.find((field) => field.path.startsWith(`${path}.`));
+  return first && { field: first, path: first.path, rows: '' };
 }

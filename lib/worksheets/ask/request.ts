@@ -48,6 +48,7 @@ const builtRows = (rows: RowsAsk, count: number, typed: Typed, path: string, fau
 export function requestFrom(ask: Ask, typed: Typed): Outcome<Tree> {
   const faults: FieldFault[] = [];
   const request = build(fieldsOf(ask), typed, '', faults);
+  for (const part of ask.parts ?? []) request[part] ??= {};
   return faults.length > 0 ? refuse(422, 'Not a number', 'A field holds no number.', faults) : done(request);
 }
 

@@ -8,6 +8,7 @@ export const CONCENTRATIONS = [
 
 export const dilutionAsk: Ask = {
   name: 'dilution',
+  parts: ['generation', 'limit'],
   groups: [
     circumstances,
     {

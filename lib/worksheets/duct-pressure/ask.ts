@@ -4,6 +4,7 @@ import { airflowAsk, circumstances, hoodAsk, moreDuct, runsAsk } from '@/lib/wor
 
 export const ductPressureAsk: Ask = {
   name: 'duct-pressure',
+  parts: ['hood'],
   groups: [
     circumstances,
     {

@@ -1,5 +1,6 @@
 import type { Air } from '@/lib/air/air-density';
 import { balancingLosses, solveNetwork, type Branch } from '@/lib/air/branch-network';
+import { networkLossAt } from '@/lib/air/network-loss';
 import type { Fan } from '@/lib/air/fan-curve';
 import { cubicMetresPerSecond, pascals } from '@/lib/units/quantity';
 import { systemOf } from '@/lib/worksheets/duct-system';
@@ -24,5 +25,5 @@ export function shareOf(question: FanDutyQuestion, fan: Fan, air: Air) {
     ...(wanted === undefined ? {} : { wanted }),
     ...(balance.has(name) ? { balancingLossFactor: balance.get(name)! } : {}),
   }));
-  return { network, shares };
+  return { network, shares, pressureAt: networkLossAt({ branches, main, air }) };
 }

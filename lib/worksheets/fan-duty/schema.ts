@@ -49,7 +49,11 @@ export const fanDutyResult = z.strictObject({
     .describe('share of the curve’s speed that gives targetAirflow; null where none does'),
   loadedFilter: duty.optional().describe('the same with the filter loaded'),
   crossings: z.array(duty).describe('every stable meeting'),
-  curves: z.strictObject({ fan: points, system: points }),
+  curves: z.strictObject({
+    fan: points,
+    system: points.describe('what hood, duct and filter ask for; of several machines, all of them together'),
+    loaded: points.optional().describe('the system with the filter loaded'),
+  }),
   branches: z
     .array(
       z.strictObject({

@@ -4,7 +4,7 @@ import type { Fan } from '@/lib/air/fan-curve';
 import { meetingOf, speedFor, type Meeting } from '@/lib/air/operating-point';
 import { systemPressure } from '@/lib/air/system-pressure';
 import { done, refuse, type Outcome } from '@/lib/outcome';
-import { cubicMetresPerSecond, kilogramsPerCubicMetre } from '@/lib/units/quantity';
+import { kilogramsPerCubicMetre } from '@/lib/units/quantity';
 import { airOf, systemOf } from '@/lib/worksheets/duct-system';
 import { cautionsOf } from '@/lib/worksheets/circumstances';
 import { fanFrom } from '@/lib/worksheets/fan';
@@ -23,11 +23,14 @@ const pressureAt = (system: DuctSystem, air: Air, room: number, loaded = false) 
   return (q: number) => asked(q) - room;
 };
 
-function curvesOf({ fan, system, air, meeting }: Solved, room: number): FanDutyResult['curves'] {
+type Asks = (airflow: number) => number;
+
+/** The fan and what its system asks of it, with a loaded filter too where that is known. */
+function curvesOf({ fan, meeting }: Solved, asks: Asks, loaded?: Asks): FanDutyResult['curves'] {
   const end = Math.max(fan.end, (meeting.crossings.at(-1)?.airflow ?? 0) * 1.1);
   const flows = Array.from({ length: SHOWN + 1 }, (_, i) => (end * i) / SHOWN);
   const drawn = (at: (q: number) => number) => flows.map((airflow) => ({ airflow, staticPressure: at(airflow) }));
-  return { fan: drawn(fan.pressureAt), system: drawn(pressureAt(system, air, room)) };
+  return { fan: drawn(fan.pressureAt), system: drawn(asks), ...(loaded && { loaded: drawn(loaded) }) };
 }
 
 const refused = () =>
@@ -48,30 +51,31 @@ export function solveFanDuty(question: FanDutyQuestion): Outcome<Answer<FanDutyR
   const [fan, system, room] = [fanFrom(question.fan, air.density), systemOf(question), question.roomPressure ?? 0];
   const several = question.branches && question.branches.length > 0;
   const shared = several ? shareOf(question, fan, air) : undefined;
+  const asks = shared?.pressureAt ?? pressureAt(system, air, room);
   const meeting = shared
     ? {
         crossings: [shared.network],
         beyond: shared.network.airflow > fan.end,
         stall: shared.network.airflow < fan.peak.airflow,
       }
-    : meetingOf(fan, pressureAt(system, air, room));
+    : meetingOf(fan, asks);
   const [first] = meeting.crossings;
   if (!first) return refused();
   const hasLoaded = question.filter?.loaded !== undefined && !several;
-  const loaded = hasLoaded ? meetingOf(fan, pressureAt(system, air, room, true)) : undefined;
+  const asksLoaded = hasLoaded ? pressureAt(system, air, room, true) : undefined;
+  const loaded = asksLoaded && meetingOf(fan, asksLoaded);
   const solved: Solved = { fan, system, air, meeting, loaded };
   const { targetAirflow: target } = question;
   const speed =
     target === undefined || several
       ? undefined
-      : (speedFor(fanFrom({ ...question.fan, speed: 1 }, air.density), target, pressureAt(system, air, room)(target)) ??
-        null);
+      : (speedFor(fanFrom({ ...question.fan, speed: 1 }, air.density), target, asks(target)) ?? null);
   const result: FanDutyResult = {
     ...{ airflow: first.airflow, staticPressure: first.staticPressure },
     ...(speed === undefined ? {} : { speedForAirflow: speed }),
     ...(loaded?.crossings[0] ? { loadedFilter: loaded.crossings[0] } : {}),
     crossings: meeting.crossings.map(({ airflow, staticPressure }) => ({ airflow, staticPressure })),
-    curves: curvesOf(solved, room),
+    curves: curvesOf(solved, asks, asksLoaded),
     ...(shared ? { branches: shared.shares } : {}),
   };
   return done({

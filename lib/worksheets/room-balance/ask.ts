@@ -53,6 +53,7 @@ const appliances: FieldAsk = {
 
 export const roomBalanceAsk: Ask = {
   name: 'room-balance',
+  parts: ['room', 'air', 'makeUp'],
   groups: [
     circumstances,
     {

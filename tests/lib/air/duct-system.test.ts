@@ -54,7 +54,7 @@ describe('a duct system', () => {
       fc.property(systems, real(1e-6, 3), fc.boolean(), (system, q, loaded) => {
         const { staticPressure } = systemLoss(system, at(q), ROOM_AIR, loaded);
         expect(Math.abs(systemPressure(system, ROOM_AIR, loaded)(q) - staticPressure)).toBeLessThanOrEqual(
-          1e-12 * staticPressure,
+          1e-11 * staticPressure,
         );
       }),
       { numRuns: 500 },
@@ -68,7 +68,8 @@ describe('a duct system', () => {
         const ducts = loss.runs.reduce((sum, run) => sum + run.friction + run.fittings, 0);
         const sum = loss.hoodStaticPressure + ducts + loss.filter + loss.outlet;
         expect(loss.staticPressure / sum).toBeCloseTo(1, 9);
-        expect((loss.fanStaticPressure + loss.runs.at(-1)!.velocityPressure) / sum).toBeCloseTo(1, 9);
+        const last = loss.runs.at(-1)!.velocityPressure;
+        expect(Math.abs(loss.fanStaticPressure + last - sum)).toBeLessThanOrEqual(1e-12 * (sum + last));
       }),
       { numRuns: 500 },
     );

@@ -27,8 +27,8 @@ export function FanDutyView({ result, system }: ResultProps<FanDutyResult>) {
           label="Machines on this fan"
           heads={['Machine', 'Gate', 'Gets', 'Needs', 'Velocity', 'Gate must add C']}
         >
-          {branches.map((each) => (
-            <tr key={each.name} className="border-b border-rule">
+          {branches.map((each, i) => (
+            <tr key={`${i} ${each.name}`} className="border-b border-rule">
               <th scope="row" className="p-2 text-left">
                 {each.name}
               </th>

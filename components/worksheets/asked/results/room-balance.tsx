@@ -1,4 +1,5 @@
 import { RoomFigure } from '@/components/figures/room-figure';
+import { MonoxideLevels } from '@/components/worksheets/monoxide-levels';
 import { RuledTable } from '@/components/ui/ruled-table';
 import { figure, told } from '@/lib/units/show';
 import type { RoomBalanceResult } from '@/lib/worksheets/room-balance/schema';
@@ -23,8 +24,8 @@ export function RoomBalanceView({ result, system }: ResultProps<RoomBalanceResul
           label="Flued appliances"
           heads={['Appliance', 'Flue pulls', 'Room may go to', 'With everything on']}
         >
-          {appliances.map(({ name, draught, limit, spills }) => (
-            <tr key={name} className="border-b border-rule">
+          {appliances.map(({ name, draught, limit, spills }, i) => (
+            <tr key={`${i} ${name}`} className="border-b border-rule">
               <th scope="row" className="p-2 text-left">
                 {name}
               </th>
@@ -48,6 +49,7 @@ export function RoomBalanceView({ result, system }: ResultProps<RoomBalanceResul
           </tr>
         ))}
       </RuledTable>
+      {appliances.length > 0 && <MonoxideLevels />}
       <RoomFigure result={result} system={system} />
     </div>
   );

@@ -4,6 +4,7 @@ import { asks } from '@/components/worksheets/asked/live-results';
 import { askPage, exampleAddress } from '@/lib/worksheets/ask/ask-page';
 import { faultsForReader, namedFaults } from '@/lib/worksheets/ask/faults';
 import { fieldAt, fieldsOf, type Ask } from '@/lib/worksheets/ask/fields';
+import { isExample } from '@/lib/worksheets/ask/is-example';
 import { inUnits, requestFrom, typedOf } from '@/lib/worksheets/ask/request';
 import { withoutRow, withRow } from '@/lib/worksheets/ask/rows';
 import { isBlank, MAX_KEPT, paramsOf, typedFrom } from '@/lib/worksheets/ask/typed';
@@ -133,5 +134,49 @@ describe('a fault', () => {
     expect(namedFaults(duct, faultsForReader(duct, faults))[1]!.message).toBe('Run 1: Kind of duct: Choose one.');
     expect(fieldAt(fieldsOf(duct), 'runs.1.fittings.0.k')?.rows).toBe('run 2, fitting 1');
     expect(fieldAt(fieldsOf(duct), 'runs.x.k')).toBeUndefined();
+  });
+
+  it('of a thing of several fields stands beside the first of them, within rows too', () => {
+    expect(fieldAt(fieldsOf(duct), 'hood')?.path).toBe('hood.entryLossFactor');
+    expect(fieldAt(fieldsOf(asks['room-balance']), 'exhausts.1.hood')).toMatchObject({
+      path: 'exhausts.1.hood.entryLossFactor',
+      rows: 'exhaust 2',
+    });
+    expect(faultsForReader(duct, [{ path: 'hood', message: 'is missing' }])).toEqual([
+      { path: 'hood.entryLossFactor', message: 'Entry loss factor F of the hood is missing.' },
+    ]);
+  });
+
+  it('of one tick stands beside them all', () => {
+    const [fault] = faultsForReader(duct, [{ path: 'circumstances.3', message: 'must be one of: a, b' }]);
+    expect(fault).toEqual({ path: 'circumstances', message: 'Something is ticked that this form does not have.' });
+    expect(namedFaults(duct, [fault!])).toEqual([fault]);
+  });
+});
+
+describe('a question with nothing filled in', () => {
+  it('still has the parts that are always asked for, so that each is told what it lacks', () => {
+    expect(requestFrom(asks['room-balance'], typed('', asks['room-balance']))).toMatchObject({
+      value: { room: {}, air: {}, makeUp: {} },
+    });
+  });
+
+  it('may leave a room without any way in for air: that is a question too', () => {
+    const sealed = 'room.volume=60&air.indoor=20&air.outdoor=20&exhausts.0.name=fan&exhausts.0.airflow=100';
+    const asked = askPage(worksheetNamed('room-balance')!, asks['room-balance'], address(sealed), libraryFacts);
+    expect(JSON.stringify(asked)).not.toContain('is missing');
+  });
+});
+
+describe('the invented example', () => {
+  const example = (units: 'si' | 'us') => typedOf(duct, EXAMPLES['duct-pressure']!, units);
+
+  it('is told from any other question, in whichever units, empty fields or not', () => {
+    expect(isExample(duct, example('si'))).toBe(true);
+    expect(isExample(duct, inUnits(duct, example('si'), 'us'))).toBe(true);
+    expect(isExample(duct, typedFrom(duct, address(`${paramsOf(example('si'))}&runs.0.compression=`)))).toBe(true);
+    expect(isExample(duct, typedFrom(duct, address(`${paramsOf(example('si'))}&carries=fume`)))).toBe(false);
+    expect(isExample(duct, typed(''))).toBe(false);
+    expect(isExample({ ...duct, name: 'of no example' }, example('si'))).toBe(false);
   });
 });
