@@ -87,7 +87,7 @@ it('warns of what is ticked at once, before any number is there', async () => {
 it('shows no answer of an earlier question where all was cleared', async () => {
   open('dilution', 'limit.value=40');
   await userEvent.clear(field(/^Limit/));
-  expect(answer().getByText('Nothing asked yet')).toBeDefined();
+  expect(await answer().findByText('Nothing asked yet')).toBeDefined();
   expect(screen.queryByText('the first answer')).toBeNull();
   await new Promise((rest) => setTimeout(rest, 400));
   expect(asked).not.toHaveBeenCalled();
