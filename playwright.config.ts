@@ -25,6 +25,8 @@ const config = defineConfig({
   retries: 0,
   forbidOnly: true,
   timeout: 60_000,
+  // A slow, noisy machine takes its time: what is expected is waited for.
+  expect: { timeout: 20_000 },
   reporter: process.env.PLAYWRIGHT_JSON_OUTPUT_FILE ? [['line'], ['json']] : [['line']],
   use: {
     baseURL: process.env.BASE_URL,

@@ -30,6 +30,10 @@ export function leakageOfChanges(ach50: number, volume: CubicMetres): Leakage {
 export const leakageAirflow = ({ airflow, at }: Leakage, difference: number) =>
   ((airflow * signedPower(difference, LEAKAGE_EXPONENT)) / at ** LEAKAGE_EXPONENT) as CubicMetresPerSecond;
 
+/** The effective leakage area of a room, m2 at 4 Pa with Cd = 1: A = Q₄ / √(2 · 4 / ρ). Source: as `leakageOfArea`. */
+export const effectiveLeakageArea = (leakage: Leakage) =>
+  (leakageAirflow(leakage, 4) / Math.sqrt(8 / STATED_AT)) as SquareMetres;
+
 /** The difference that drives an airflow through the cracks of a closed room, the power law turned round: Δp = Δp₀ (Q/Q₀)^(1/0.65). */
 export function depressurisationBy(airflow: CubicMetresPerSecond, leakage: Leakage): Pascals {
   fromZeroUp({ airflow });

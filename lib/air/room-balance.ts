@@ -85,7 +85,8 @@ export function balanceRoom(room: Room): Balance {
   const taken = (pressure: number) =>
     room.indoor * room.exhausts.reduce((sum: number, exhaust) => sum + exhaust.airflowAt(pressure), 0);
   const excess = (pressure: number) => given(pressure) - taken(pressure);
-  const tallest = room.openings.reduce((most, { height = 0 }) => Math.max(most, height), room.height ?? 0);
+  const cracked = room.leakage ? (room.height ?? 0) : 0;
+  const tallest = room.openings.reduce((most, { height = 0 }) => Math.max(most, height), cracked);
   const stack = Math.abs(STANDARD_GRAVITY * (room.outdoor - room.indoor) * tallest);
   const reach = room.exhausts.reduce((most: number, exhaust) => Math.max(most, exhaust.reach), UNKNOWN_REACH) + stack;
   const pressure = excess(0) === 0 ? 0 : findRoot(excess, -reach, reach);

@@ -7,7 +7,7 @@ import { roomBalanceAnswer, roomBalanceRequest, type RoomBalanceResult } from '.
 import { solveRoomBalance } from './solve';
 
 /** All that moves the air of the room, as rows for a spreadsheet. */
-function rows({ exhausts, makeUp, roomPressure }: RoomBalanceResult, system: System): Cell[][] {
+function rows({ exhausts, makeUp, roomPressure, appliances }: RoomBalanceResult, system: System): Cell[][] {
   const flow = (value: number) => cell('airflow', value, system);
   const unit = TYPED_UNITS.airflow[system];
   return [
@@ -19,6 +19,11 @@ function rows({ exhausts, makeUp, roomPressure }: RoomBalanceResult, system: Sys
       '',
     ]),
     [`Room pressure (${TYPED_UNITS.pressure[system]})`, cell('pressure', roomPressure, system), ''],
+    ...appliances.map(({ name, draught, spills }): Cell[] => [
+      `Flue of ${name} pulls (${TYPED_UNITS.pressure[system]})`,
+      draught === null ? 'not known' : cell('pressure', draught, system),
+      spills ? 'spills' : 'not beaten by this sum',
+    ]),
   ];
 }
 

@@ -85,7 +85,8 @@ export const roomBalanceResult = z.strictObject({
       name: z.string(),
       limit: z.number().describe('Pa against outdoors that the room must not go below'),
       draught: z.number().nullable().describe('Pa that its flue pulls; null where its height is not known'),
-      spills: z.boolean(),
+      spills: z.boolean().describe('the room pulls harder than its flue, or is beyond its limit'),
+      beyondLimit: z.boolean().optional().describe('the room is below the limit of its kind of vent'),
     }),
   ),
   heat: z.number().describe('W that bring the air let in to the temperature of the room; negative cools'),
@@ -93,7 +94,7 @@ export const roomBalanceResult = z.strictObject({
     .number()
     .nullable()
     .describe(
-      'm2 of further free opening that would hold the room at its strictest limit, or 5 Pa below; null where none is needed',
+      'm2 of further free opening that would hold the room at its strictest limit, the draught of its weakest flue, or 5 Pa below; null where the room is held. A flue that pulls nothing is helped by none',
     ),
 });
 export type RoomBalanceResult = z.infer<typeof roomBalanceResult>;

@@ -2,24 +2,16 @@ import { airChanges } from '@/lib/air/air-changes';
 import { makeUpHeat } from '@/lib/air/make-up-heat';
 import { openingFor } from '@/lib/air/orifice';
 import { balanceRoom, letInAt, type Room } from '@/lib/air/room-balance';
-import { VENT_KINDS } from '@/lib/air/vent-limits';
 import { celsius, cubicMetres, cubicMetresPerSecond } from '@/lib/units/quantity';
 import { cautionsOf } from '@/lib/worksheets/circumstances';
 import type { Answer } from '@/lib/worksheets/worksheet';
-import { fluesOf } from './flues';
+import { fluesOf, heldAt } from './flues';
 import { roomOf } from './room';
 import type { RoomBalanceQuestion, RoomBalanceResult } from './schema';
 import { roomBalanceWarnings } from './warnings';
 import { roomBalanceSteps } from './working';
 
-/** How far below outdoors a room without a flue may be before its doors are hard to open, Pa: common practice, no source. */
-export const COMFORT_LIMIT = -5;
-
-/** The limit that the room is held to: of its most delicate appliance, or of its doors. */
-export const strictestLimit = ({ appliances = [] }: RoomBalanceQuestion) =>
-  Math.max(COMFORT_LIMIT, ...appliances.map(({ vent }) => VENT_KINDS[vent].limit));
-
-/** Free opening, m2, that would let in what is lacking at the strictest limit: what leaves there less what comes in there. */
+/** Free opening, m2, that would let in what is lacking where the room is to be held: what leaves there less what comes in there. */
 function openingNeeded(room: Room, pressure: number, limit: number): number | null {
   if (pressure >= limit) return null;
   const leaves = room.exhausts.reduce((sum, exhaust) => sum + exhaust.airflowAt(limit), 0);
@@ -48,7 +40,7 @@ export function solveRoomBalance(question: RoomBalanceQuestion): Answer<RoomBala
     airChangesPerHour: airChanges(cubicMetresPerSecond(Math.max(0, leaves)), cubicMetres(question.room.volume)),
     appliances: fluesOf(question, pressure),
     heat: makeUpHeat(cubicMetresPerSecond(Math.max(0, total)), room.indoor, celsius(indoor), celsius(outdoor)),
-    openingNeeded: openingNeeded(room, pressure, strictestLimit(question)),
+    openingNeeded: openingNeeded(room, pressure, heldAt(question)),
   };
   return {
     result,

@@ -1,34 +1,17 @@
 import { told, toldBoth } from '@/lib/units/show';
 import { UNKNOWN_REACH } from '@/lib/air/exhaust';
+import { VENT_KINDS } from '@/lib/air/vent-limits';
 import type { Warning } from '@/lib/worksheets/worksheet';
+import { flueWarnings } from './flue-warnings';
 import type { RoomBalanceQuestion, RoomBalanceResult } from './schema';
 
 /** An exhaust that gets less than this share of what it has alone is short: common practice, no source. */
 export const SHORT_BELOW = 0.95;
 
 const when = (holds: boolean, code: string, text: string): Warning[] => (holds ? [{ code, text }] : []);
-const pascals = (value: number) => toldBoth('pressure', Math.abs(value));
-
-function ofFlues({ appliances, roomPressure }: RoomBalanceResult): Warning[] {
-  return appliances.flatMap(({ name, limit, draught, spills }) => {
-    const pull = draught === null ? '' : ` Its flue pulls ${pascals(draught)}.`;
-    if (spills)
-      return [
-        {
-          code: 'flue-spills',
-          text: `With everything on, the room is ${pascals(roomPressure)} below outdoors: the ${name} is at the point of sending its gas, with carbon monoxide, into the room.${pull} Its limit is ${pascals(limit)}. Do not run these exhausts with it lit. Let more air in or take the exhaust away, and have a licensed person test the draught in the worst case.`,
-        },
-      ];
-    return when(
-      roomPressure < limit / 2,
-      'flue-near',
-      `The room is over half the way to the limit of the ${name}, ${pascals(limit)}.${pull} Wind, another fan or a shut door may do the rest.`,
-    );
-  });
-}
-
 function ofMakeUp({ makeUp }: RoomBalanceQuestion, result: RoomBalanceResult): Warning[] {
-  const sealed = !makeUp.leakage && (makeUp.openings ?? []).length === 0;
+  const cracks = makeUp.leakage?.areaAt4Pa ?? makeUp.leakage?.ach50 ?? 0;
+  const sealed = cracks === 0 && (makeUp.openings ?? []).length === 0;
   const short = result.exhausts.filter(({ airflow, wanted }) => airflow < SHORT_BELOW * wanted);
   const back = result.exhausts.filter(({ airflow }) => airflow < 0);
   const need = result.openingNeeded;
@@ -67,7 +50,10 @@ function ofHeat({ air }: RoomBalanceQuestion, { heat }: RoomBalanceResult): Warn
 export function roomBalanceWarnings(question: RoomBalanceQuestion, result: RoomBalanceResult): Warning[] {
   const stated = question.exhausts.some(({ fan }) => !fan);
   return [
-    ...ofFlues(result),
+    ...flueWarnings(
+      result,
+      (question.appliances ?? []).map(({ vent }) => VENT_KINDS[vent].pulls),
+    ),
     ...ofMakeUp(question, result),
     ...when(
       stated,
