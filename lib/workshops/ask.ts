@@ -84,6 +84,10 @@ const stationFields = ({ exhausts, processes }: Offers): FieldAsk[] => [
   { path: 'height', as: 'number', kind: 'length', unit: MILLIMETRES, label: 'height' },
   { path: 'openArea', as: 'number', kind: 'area', label: 'open area of an enclosure, all gaps' },
   { path: 'perimeter', as: 'number', kind: 'length', unit: FEET, label: 'rim of the work under a canopy' },
+  {
+    ...{ ...runsAsk, min: 0, max: 4, label: 'its own duct, where several machines share a fan' },
+    help: 'From this hood to where it meets the others; the duct of the exhaust is then the common one.',
+  },
 ];
 
 const readingFields = (exhausts: string[]): FieldAsk[] => [

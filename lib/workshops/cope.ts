@@ -4,6 +4,7 @@ import { cubicMetres, cubicMetresPerSecond, metres, metresPerSecond } from '@/li
 import { hoodOf } from '@/lib/worksheets/hood-airflow/hood';
 import { FIELDS_OF } from '@/lib/worksheets/hood-airflow/fields';
 import { hoodAirflowRequest } from '@/lib/worksheets/hood-airflow/schema';
+import type { RoomBalanceResult } from '@/lib/worksheets/room-balance/schema';
 import { solveRoomBalance } from '@/lib/worksheets/room-balance/solve';
 import type { Plan, PlanStation } from './plan-schema';
 import { exhaustNamed, roomNamed, roomQuestion } from './room-question';
@@ -79,6 +80,13 @@ function stopped(station: PlanStation, { control, velocity }: Need): Coped | und
   return undefined;
 }
 
+/** What a station gets of its exhaust, m3/s: its own branch where it has one, or all of it. */
+function shareOf({ exhausts }: RoomBalanceResult, name: string, station: PlanStation): number {
+  const exhaust = exhausts.find((each) => each.name === name);
+  const branch = exhaust?.branches?.find((each) => each.name === station.name);
+  return branch?.airflow ?? exhaust?.airflow ?? 0;
+}
+
 /**
  * Whether a station of a workshop has the air that a pair needs: its own hood's need at the highest stated velocity, against what its
  * exhaust delivers with everything in its room on, all solved together.
@@ -96,16 +104,25 @@ export function cope(plan: Plan, station: PlanStation, need: Need): Coped {
   const room = roomNamed(plan, exhaust.room);
   if (!room)
     return { verdict: 'cannot be judged', why: [`The room of ${exhaust.name ?? 'the exhaust'} is not described.`] };
-  const [all, alone] = [roomQuestion(plan, room), roomQuestion(plan, room, (each) => each === exhaust)];
+  const [all, alone] = [
+    roomQuestion(plan, room),
+    roomQuestion(
+      plan,
+      room,
+      (each) => each === exhaust,
+      (each) => each === station,
+    ),
+  ];
   const needed = neededAirflow(station, need.velocity!.max);
   const lacks = [...('lacks' in needed ? needed.lacks : []), ...alone.gaps];
   if (!all.value || !alone.value || alone.value.exhausts.length === 0 || 'lacks' in needed)
     return { verdict: 'cannot be judged', why: [...lacks, ...(all.value ? [] : all.gaps)] };
   const [together, by] = [solveRoomBalance(all.value).result, solveRoomBalance(alone.value).result];
-  const delivered = together.exhausts.find(({ name }) => name === alone.value!.exhausts[0]!.name)?.airflow ?? 0;
+  const name = alone.value.exhausts[0]!.name;
+  const delivered = shareOf(together, name, station);
   const leaves = together.exhausts.reduce((sum, { airflow }) => sum + Math.max(0, airflow), 0);
   const measured: Measured = {
-    ...{ needed: needed.airflow, delivered, alone: by.exhausts[0]!.airflow, share: delivered / needed.airflow },
+    ...{ needed: needed.airflow, delivered, alone: shareOf(by, name, station), share: delivered / needed.airflow },
     roomPressure: together.roomPressure,
     spills: together.appliances.filter(({ spills }) => spills).map(({ name }) => name),
     clearing:

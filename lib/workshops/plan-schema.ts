@@ -64,6 +64,7 @@ const station = z.strictObject({
   height: length(20),
   openArea: between('area', 0, 400).optional(),
   perimeter: length(80),
+  runs: runs.optional().describe('its own duct up to a common one; the exhaust’s runs are then the common duct'),
 });
 
 export const READINGS = ['face-velocity', 'static-pressure'] as const;

@@ -21,8 +21,28 @@ type Asked = RoomBalanceQuestion['exhausts'][number];
 /** What is lacking is told by `gaps`, what was assumed by `assumptions`, in sentences. */
 export type Ready<T> = { value?: T; gaps: string[]; assumptions: string[] };
 
-/** An exhaust as the room worksheet asks for it; its filter is taken as loaded where that is known. */
-export function exhaustOf(exhaust: PlanExhaust, station?: PlanStation): Ready<Asked> {
+const entryOf = ({ entryLossFactor }: PlanExhaust, station?: PlanStation) =>
+  entryLossFactor ?? ASSUMED.entryLossFactor[station?.hood ?? 'plain-opening'];
+
+/** The stations of an exhaust that have a duct of their own: machines on one fan. `open` tells whose gate is. */
+const branchesOf = (exhaust: PlanExhaust, stations: readonly PlanStation[], open: (station: PlanStation) => boolean) =>
+  stations.flatMap((station) =>
+    station.runs && station.name
+      ? [
+          {
+            ...{ name: station.name, runs: station.runs, hood: { entryLossFactor: entryOf(exhaust, station) } },
+            gate: open(station) ? ('open' as const) : ('shut' as const),
+          },
+        ]
+      : [],
+  );
+
+/** An exhaust with its stations as the room worksheet asks for it; its filter is taken as loaded where that is known. */
+export function exhaustOf(
+  exhaust: PlanExhaust,
+  stations: readonly PlanStation[] = [],
+  open: (station: PlanStation) => boolean = () => true,
+): Ready<Asked> {
   const { airflow, fan, runs, filter, outletLossFactor, name = 'the exhaust' } = exhaust;
   const assumptions: string[] = [];
   if (airflow !== undefined && !fan) {
@@ -30,15 +50,18 @@ export function exhaustOf(exhaust: PlanExhaust, station?: PlanStation): Ready<As
     return { value: { name, airflow }, gaps: [], assumptions };
   }
   if (!fan || !runs) return { gaps: [`${name} has no airflow, and no fan curve with its duct.`], assumptions };
-  const assumed = ASSUMED.entryLossFactor[station?.hood ?? 'plain-opening'];
+  const branches = branchesOf(exhaust, stations, open);
   if (exhaust.entryLossFactor === undefined)
-    assumptions.push(`The hood of ${name} is taken to lose ${assumed} velocity pressures on entry.`);
+    assumptions.push(
+      `The hood of ${name} is taken to lose ${entryOf(exhaust, stations[0])} velocity pressures on entry.`,
+    );
   if (filter?.loaded !== undefined) assumptions.push(`The filter of ${name} is taken as loaded.`);
+  if (branches.length > 1) assumptions.push(`All gates of ${name} are taken as open where everything is on.`);
   const full = filter?.clean !== undefined && filter.at !== undefined;
   return {
     value: {
       ...{ name, fan, runs },
-      hood: { entryLossFactor: exhaust.entryLossFactor ?? assumed },
+      ...(branches.length > 0 ? { branches } : { hood: { entryLossFactor: entryOf(exhaust, stations[0]) } }),
       ...(full ? { filter: { clean: filter.loaded ?? filter.clean!, at: filter.at! } } : {}),
       ...(outletLossFactor === undefined ? {} : { outlet: { k: outletLossFactor } }),
     },
@@ -54,6 +77,8 @@ export const exhaustNamed = ({ exhausts = [] }: Plan, name?: string) =>
 export const roomNamed = ({ rooms = [] }: Plan, name?: string) =>
   rooms.find((each) => name && same(each.name, name)) ?? (rooms.length === 1 ? rooms[0] : undefined);
 export const stationNamed = ({ stations = [] }: Plan, name: string) => stations.find((each) => same(each.name, name));
+const stationsAt = ({ stations = [] }: Plan, exhaust: PlanExhaust) =>
+  stations.filter((each) => each.exhaust && same(each.exhaust, exhaust.name));
 export const exhaustsOf = (plan: Plan, room: PlanRoom) =>
   (plan.exhausts ?? []).filter((each) => roomNamed(plan, each.room) === room);
 
@@ -72,18 +97,14 @@ export function roomQuestion(
   plan: Plan,
   room: PlanRoom,
   counts: (exhaust: PlanExhaust) => boolean = () => true,
+  open: (station: PlanStation) => boolean = () => true,
 ): Ready<RoomBalanceQuestion> {
   const { climate = {} } = plan;
   const title = room.name ?? 'the room';
   if (room.volume === undefined) return { gaps: [`The volume of ${title} is missing.`], assumptions: [] };
   const exhausts = exhaustsOf(plan, room)
     .filter(counts)
-    .map((each) =>
-      exhaustOf(
-        each,
-        (plan.stations ?? []).find(({ exhaust }) => same(exhaust, each.name)),
-      ),
-    );
+    .map((each) => exhaustOf(each, stationsAt(plan, each), open));
   const assumptions = exhausts.flatMap((each) => each.assumptions);
   if (climate.indoor === undefined || climate.outdoor === undefined)
     assumptions.push(

@@ -6,9 +6,13 @@ import { cubicMetresPerSecond, pascals } from '@/lib/units/quantity';
 import { systemOf } from '@/lib/worksheets/duct-system';
 import type { FanDutyQuestion, FanDutyResult } from './schema';
 
-type Asked = NonNullable<FanDutyQuestion['branches']>[number];
+export type AskedBranch = NonNullable<FanDutyQuestion['branches']>[number];
 
-const branchOf = ({ name, hood, runs, gate = 'open', leak, wanted, roomPressure }: Asked, room: number): Branch => ({
+/** A branch of the network that a question describes, its room at `room` Pa where it does not say. */
+export const branchOf = (
+  { name, hood, runs, gate = 'open', leak, wanted, roomPressure }: AskedBranch,
+  room = 0,
+): Branch => ({
   ...{ name, system: systemOf({ hood, runs }), open: gate === 'open', leak },
   roomPressure: pascals(roomPressure ?? room),
   wanted: wanted === undefined ? undefined : cubicMetresPerSecond(wanted),

@@ -6,7 +6,8 @@ import { fan } from '@/lib/worksheets/fan-schema';
 import { air, airflow, between, name, plain } from '@/lib/worksheets/parts-schema';
 
 export const MAX_BRANCHES = 8;
-const branch = z.strictObject({
+/** One machine on a fan: its hood, its duct up to the common one, its gate. */
+export const branch = z.strictObject({
   name,
   hood,
   runs: runs.max(4, 'at most 4 runs'),

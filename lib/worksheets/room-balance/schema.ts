@@ -3,6 +3,7 @@ import { VENTS } from '@/lib/air/vent-limits';
 import { answerOf } from '@/lib/worksheets/answer-schema';
 import { circumstancesField } from '@/lib/worksheets/circumstances-schema';
 import { ductSystem, hood, runs } from '@/lib/worksheets/duct-schema';
+import { branch, MAX_BRANCHES } from '@/lib/worksheets/fan-duty/schema';
 import { fan } from '@/lib/worksheets/fan-schema';
 import { airflow, between, name, plain, volume } from '@/lib/worksheets/parts-schema';
 
@@ -19,6 +20,11 @@ const exhaust = z
     ...ductSystem,
     hood: hood.optional(),
     runs: runs.optional(),
+    branches: z
+      .array(branch.omit({ roomPressure: true }))
+      .max(MAX_BRANCHES)
+      .optional()
+      .describe('machines on this fan, all in this room; `runs` are then the common duct, and it has no hood'),
   })
   .superRefine((given, context) => {
     const fault = (path: string, message: string) => context.addIssue({ code: 'custom', path: [path], message });
@@ -26,7 +32,7 @@ const exhaust = z
       fault('airflow', 'give an airflow, or a fan with hood and runs, not both');
     else if (given.airflow === undefined && !given.fan)
       fault('airflow', 'is missing: an airflow, or a fan with hood and runs');
-    if (given.fan && !given.hood) fault('hood', 'is missing: a fan needs its hood');
+    if (given.fan && !given.hood && !given.branches?.length) fault('hood', 'is missing: a fan needs its hood');
     if (given.fan && !given.runs) fault('runs', 'is missing: a fan needs its duct');
   });
 
@@ -76,7 +82,15 @@ const flow = z.number().describe('m3/s at the density of the room');
 
 export const roomBalanceResult = z.strictObject({
   roomPressure: z.number().describe('Pa against outdoors at the floor; negative is below'),
-  exhausts: z.array(z.strictObject({ name: z.string(), airflow: flow, wanted: flow })),
+  exhausts: z.array(
+    z.strictObject({
+      ...{ name: z.string(), airflow: flow, wanted: flow },
+      branches: z
+        .array(z.strictObject({ name: z.string(), gate: z.enum(['open', 'shut']), airflow: flow }))
+        .optional()
+        .describe('how its machines share it; negative comes out of the hood'),
+    }),
+  ),
   makeUp: z.strictObject({ supply: flow, openings: flow, leakage: flow, total: flow }),
   shortfall: z.number().describe('m3/s that all exhausts together get less than each would have with the room open'),
   airChangesPerHour: z.number(),

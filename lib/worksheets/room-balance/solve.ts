@@ -1,5 +1,7 @@
 import { airChanges } from '@/lib/air/air-changes';
 import { makeUpHeat } from '@/lib/air/make-up-heat';
+import type { Exhaust } from '@/lib/air/exhaust';
+import type { NetworkExhaust } from '@/lib/air/network-exhaust';
 import { openingFor } from '@/lib/air/orifice';
 import { balanceRoom, letInAt, type Room } from '@/lib/air/room-balance';
 import { celsius, cubicMetres, cubicMetresPerSecond } from '@/lib/units/quantity';
@@ -34,7 +36,10 @@ export function solveRoomBalance(question: RoomBalanceQuestion): Answer<RoomBala
   const total = supply + openings + leakage;
   const result: RoomBalanceResult = {
     roomPressure: pressure,
-    exhausts: exhausts.map(({ name, airflow, wanted: asked }) => ({ name, airflow, wanted: asked })),
+    exhausts: exhausts.map(({ name, airflow, wanted: asked }, i) => ({
+      ...{ name, airflow, wanted: asked },
+      ...sharesOf(room.exhausts[i]!, pressure),
+    })),
     makeUp: { supply, openings, leakage, total },
     shortfall: Math.max(0, wanted - leaves),
     airChangesPerHour: airChanges(cubicMetresPerSecond(Math.max(0, leaves)), cubicMetres(question.room.volume)),
@@ -48,6 +53,16 @@ export function solveRoomBalance(question: RoomBalanceQuestion): Answer<RoomBala
     warnings: [...cautionsOf(circumstancesOf(question)), ...roomBalanceWarnings(question, result)],
   };
 }
+
+/** How the machines of one exhaust share it at the pressure of the room; nothing for an exhaust of its own. */
+const sharesOf = (exhaust: Exhaust, pressure: number) =>
+  'branchesAt' in exhaust
+    ? {
+        branches: (exhaust as NetworkExhaust).branchesAt(pressure).map(({ name, open, airflow }) => ({
+          ...{ name, airflow, gate: open ? ('open' as const) : ('shut' as const) },
+        })),
+      }
+    : {};
 
 /** A flued appliance that is told of leads with its caution, ticked or not. */
 const circumstancesOf = ({ circumstances = [], appliances = [] }: RoomBalanceQuestion) =>

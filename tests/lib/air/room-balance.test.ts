@@ -71,7 +71,6 @@ describe('a room', () => {
               ...room,
               leakage: leakageOfArea(squareMetres(leak)),
               height: undefined,
-              openings: [],
               outdoor: room.indoor,
               supply: cubicMetresPerSecond(0),
             }),
@@ -130,6 +129,28 @@ describe('a room', () => {
     });
     expect(total(sealed)).toBeCloseTo(0, 12);
     expect(sealed.pressure).toBeGreaterThanOrEqual(-UNKNOWN_REACH - 1e-9);
+  });
+
+  it('sealed and tall on a cold day, is drawn no further down than a stated exhaust reaches', () => {
+    const { pressure } = balanceRoom({
+      ...{ indoor: air(20), outdoor: air(-30), height: metres(30), openings: [] },
+      exhausts: [statedExhaust('fan', cubicMetresPerSecond(0.2))],
+      supply: cubicMetresPerSecond(0),
+    });
+    expect(pressure).toBeGreaterThanOrEqual(-UNKNOWN_REACH);
+  });
+
+  it('open at two heights and with nothing on, lets cold air in below and its own out above, halfway between by height', () => {
+    const [indoor, outdoor] = [air(20), air(0)];
+    const openings = [0.5, 2.5].map((height) => ({ area: squareMetres(0.1), height: metres(height) }));
+    const { pressure, openings: net } = balanceRoom({
+      ...{ indoor, outdoor, openings, exhausts: [] },
+      supply: cubicMetresPerSecond(0),
+    });
+    // Mass balance by hand: ρo d1 = ρi d2 with d1 + d2 = 2 m, so the neutral level is 0.5 + 2 ρi / (ρi + ρo) m up.
+    const neutral = 0.5 + (2 * indoor) / (indoor + outdoor);
+    expect(pressure).toBeCloseTo(-9.80665 * (outdoor - indoor) * neutral, 9);
+    expect(net).toBeCloseTo(0, 9);
   });
 
   it('with a fan on its duct gives that fan less than it has alone, and the fan with the more pressure keeps the more', () => {

@@ -98,6 +98,31 @@ describe('whether a station copes', () => {
   });
 });
 
+describe('machines on one fan', () => {
+  it('each get their branch: less with every gate open than with their own alone', () => {
+    const fan = {
+      curve: [
+        { airflow: 0, staticPressure: 500 },
+        { airflow: 0.3, staticPressure: 0 },
+      ],
+    };
+    const own = (name: string, length: number): PlanStation => ({
+      ...station,
+      name,
+      runs: [{ duct: 'galvanised-steel', diameter: 0.1, length }],
+    });
+    const shop: Plan = {
+      rooms: [{ name: 'room', volume: 60, openings: [{ area: 0.5 }] }],
+      exhausts: [{ name: 'fan', room: 'room', fan, runs: [{ duct: 'galvanised-steel', diameter: 0.15, length: 3 }] }],
+      stations: [own('near', 1), own('far', 12)],
+    };
+    const [near, far] = shop.stations!.map((each) => measured(cope(shop, each, LOCAL)));
+    expect(far!.delivered).toBeLessThan(near!.delivered);
+    expect(far!.delivered).toBeLessThan(far!.alone);
+    expect(far!.assumptions.join(' ')).toContain('gates');
+  });
+});
+
 describe('what would change it most', () => {
   const fixes = (plan: Plan, at: PlanStation) => {
     const now = cope(plan, at, LOCAL);

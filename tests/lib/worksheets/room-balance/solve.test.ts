@@ -107,6 +107,44 @@ describe('the room worksheet', () => {
     expect(result.exhausts.reduce((sum, { airflow }) => sum + airflow, 0)).toBeCloseTo(result.makeUp.total, 9);
   });
 
+  it('solves machines on one fan, the room and the flue together', () => {
+    const fan = {
+      curve: [
+        { airflow: 0, staticPressure: 500 },
+        { airflow: 0.3, staticPressure: 0 },
+      ],
+    };
+    const machine = (name: string, length: number, gate = 'open') => ({
+      ...{ name, gate, hood: { entryLossFactor: 0.5 } },
+      runs: [{ duct: 'galvanised-steel', diameter: 0.1, length }],
+    });
+    const shop = (second: string, leakage = { ach50: 2 }) =>
+      solve({
+        exhausts: [
+          {
+            name: 'fan',
+            fan,
+            runs: [{ duct: 'galvanised-steel', diameter: 0.15, length: 3 }],
+            branches: [machine('near', 1), machine('far', 12, second)],
+          },
+        ],
+        makeUp: { leakage },
+        appliances: [heater],
+      }).result;
+    const both = shop('open');
+    const [near, far] = both.exhausts[0]!.branches!;
+    expect(near!.airflow).toBeGreaterThan(far!.airflow);
+    expect(near!.airflow + far!.airflow).toBeCloseTo(both.exhausts[0]!.airflow, 9);
+    expect(both.exhausts[0]!.airflow).toBeCloseTo(both.makeUp.total, 9);
+    expect(both.exhausts[0]!.airflow).toBeLessThan(both.exhausts[0]!.wanted);
+    expect(both.appliances[0]!.spills).toBe(true);
+    const alone = shop('shut').exhausts[0]!.branches!;
+    expect(alone[0]!.airflow).toBeGreaterThan(near!.airflow);
+    expect(alone[1]).toMatchObject({ gate: 'shut' });
+    // In a room that leaks freely the branches are those of the fan worksheet, with no pressure of the room.
+    expect(shop('open', { ach50: 200 }).exhausts[0]!.airflow / both.exhausts[0]!.wanted).toBeGreaterThan(0.98);
+  });
+
   it.each([
     [
       'a fan without a duct',
