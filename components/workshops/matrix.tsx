@@ -21,6 +21,19 @@ function Cell({ cell, onOpen }: { cell: CopeAnswer; onOpen: () => void }) {
   );
 }
 
+/** A cell with what would mend it, which is asked for only now. */
+function Opened({ plan, cell }: { plan: Plan; cell: CopeAnswer }) {
+  const { station, materials, process } = cell;
+  const { data } = usePosted<CopeAnswer>('/api/workshops/cope', {
+    workshop: plan,
+    station,
+    material: materials,
+    process,
+  });
+  const isIts = data?.station === station && data.materials.join() === materials.join();
+  return <Coped answer={isIts ? data : cell} />;
+}
+
 /** Every station against the usual materials: which control, and whether it copes. On paper a sheet for the wall. */
 export function Matrix({ plan }: { plan: Plan }) {
   const ready = (plan.stations ?? []).some(({ name, process }) => name && process) && (plan.materials ?? []).length > 0;
@@ -52,7 +65,7 @@ export function Matrix({ plan }: { plan: Plan }) {
           <h3>
             {chosen.station}: {data!.materials[open.column]!.title}
           </h3>
-          <Coped answer={chosen} />
+          <Opened plan={plan} cell={chosen} />
         </div>
       )}
     </section>

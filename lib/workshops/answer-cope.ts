@@ -2,9 +2,9 @@ import { answerCheck } from '@/lib/check/answer-check';
 import type { Library } from '@/lib/entries/library';
 import { done, refuse, type Outcome } from '@/lib/outcome';
 import { toldBoth } from '@/lib/units/show';
-import { cope, type Coped } from './cope';
+import { cope, deliver, type Coped, type Delivered, type Need } from './cope';
 import type { CopeAnswer, CopeQuestion, MatrixAnswer } from './cope-schema';
-import { fixesFor } from './fixes';
+import { fixesFor, type Fix } from './fixes';
 import type { Plan, PlanStation } from './plan-schema';
 import { stationNamed } from './room-question';
 
@@ -22,18 +22,19 @@ function textOf(now: Coped): string {
     : `Falls short by ${toldBoth('airflow', now.needed - now.delivered)}: ${has}.${flue}`;
 }
 
-/** One pair at one station of a workshop, answered from a published library. Pure. */
-export function copeWith(
-  library: Library,
-  plan: Plan,
-  station: PlanStation,
-  materials: string[],
-  process: string,
-): CopeAnswer {
+/** What a pair asks of a station, from a published library. */
+function needOf(library: Library, materials: string[], process: string): Need {
   const { control, capture } = answerCheck(library, materials, process);
-  const need = { control, ...(capture ? { velocity: capture.velocity } : {}) };
-  const now = cope(plan, station, need);
-  const fixes = fixesFor(plan, station, need, now);
+  return { control, ...(capture ? { velocity: capture.velocity } : {}) };
+}
+
+/** One verdict as it goes out. */
+function answerOf(
+  { materials, process, station }: { materials: string[]; process: string; station: PlanStation },
+  { control }: Need,
+  now: Coped,
+  fixes: Fix[],
+): CopeAnswer {
   const measured = 'share' in now ? now : undefined;
   return {
     ...{ materials, process, station: station.name ?? '', control, verdict: now.verdict, text: textOf(now) },
@@ -58,12 +59,28 @@ export function answerCope(
     refuse(422, 'Impossible', 'That cannot be judged as it stands.', [{ path, message }]);
   if (!station) return no('station', 'is not a station of this workshop');
   const chosen = process ?? station.process;
-  return chosen
-    ? done(copeWith(library, workshop, station, material, chosen))
-    : no('process', 'is missing: the station names none');
+  if (!chosen) return no('process', 'is missing: the station names none');
+  const need = needOf(library, material, chosen);
+  const now = cope(workshop, station, need);
+  return done(
+    answerOf({ materials: material, process: chosen, station }, need, now, fixesFor(workshop, station, need, now)),
+  );
 }
 
-/** Every station of a workshop against its usual materials. */
+function cellsOf(library: Library, plan: Plan, station: PlanStation, slugs: string[]): CopeAnswer[] {
+  const process = station.process!;
+  let given: Delivered | undefined;
+  const delivers = () => (given ??= deliver(plan, station));
+  return slugs.map((slug) => {
+    const need = needOf(library, [slug], process);
+    return answerOf({ materials: [slug], process, station }, need, cope(plan, station, need, delivers), []);
+  });
+}
+
+/**
+ * Every station of a workshop against its usual materials. What a station is delivered is solved once; what would mend it is left to
+ * `answerCope`, one pair at a time.
+ */
 export function answerMatrix(library: Library, plan: Plan): MatrixAnswer {
   const slugs = [...new Set((plan.materials ?? []).flatMap(({ material }) => material || []))];
   const titleOf = (kind: string, slug: string) => library.byKey.get(`${kind}:${slug}`)?.title ?? slug;
@@ -74,7 +91,7 @@ export function answerMatrix(library: Library, plan: Plan): MatrixAnswer {
         ? [
             {
               ...{ station: station.name, process: station.process, processTitle: titleOf('process', station.process) },
-              cells: slugs.map((slug) => copeWith(library, plan, station, [slug], station.process!)),
+              cells: cellsOf(library, plan, station, slugs),
             },
           ]
         : [],

@@ -4,9 +4,9 @@ import { cubicMetres, cubicMetresPerSecond, metres, metresPerSecond } from '@/li
 import { hoodOf } from '@/lib/worksheets/hood-airflow/hood';
 import { FIELDS_OF } from '@/lib/worksheets/hood-airflow/fields';
 import { hoodAirflowRequest } from '@/lib/worksheets/hood-airflow/schema';
-import type { RoomBalanceResult } from '@/lib/worksheets/room-balance/schema';
+import type { RoomBalanceQuestion, RoomBalanceResult } from '@/lib/worksheets/room-balance/schema';
 import { solveRoomBalance } from '@/lib/worksheets/room-balance/solve';
-import type { Plan, PlanStation } from './plan-schema';
+import type { Plan, PlanExhaust, PlanRoom, PlanStation } from './plan-schema';
 import { exhaustNamed, roomNamed, roomQuestion } from './room-question';
 
 /** What a pair asks of a station: its control, and the velocity at the source, m/s, where one is stated. */
@@ -87,47 +87,55 @@ function shareOf({ exhausts }: RoomBalanceResult, name: string, station: PlanSta
   return branch?.airflow ?? exhaust?.airflow ?? 0;
 }
 
-/**
- * Whether a station of a workshop has the air that a pair needs: its own hood's need at the highest stated velocity, against what its
- * exhaust delivers with everything in its room on, all solved together.
- * @returns prohibited stays prohibited; what is missing is told
- */
-export function cope(plan: Plan, station: PlanStation, need: Need): Coped {
-  const before = stopped(station, need);
-  if (before) return before;
+/** Rooms solved with everything on, by the plan they are in: all stations of a room ask for the same. */
+const solved = new WeakMap<Plan, Map<PlanRoom, RoomBalanceResult>>();
+
+function everythingOn(plan: Plan, room: PlanRoom, question: RoomBalanceQuestion): RoomBalanceResult {
+  const rooms = solved.get(plan) ?? new Map<PlanRoom, RoomBalanceResult>();
+  solved.set(plan, rooms);
+  const held = rooms.get(room) ?? solveRoomBalance(question).result;
+  rooms.set(room, held);
+  return held;
+}
+
+/** What a station is delivered, whatever pair is asked of it; or what its description lacks. */
+export type Delivered = Omit<Measured, 'needed' | 'share'> | { lacks: string[] };
+
+/** What the exhaust of a station delivers there with everything in its room on, and with it alone, all solved together. */
+export function deliver(plan: Plan, station: PlanStation): Delivered {
   const exhaust = exhaustNamed(plan, station.exhaust);
-  if (!exhaust)
-    return {
-      verdict: 'cannot be judged',
-      why: [`${station.name ?? 'The station'} is at no exhaust that is described.`],
-    };
+  if (!exhaust) return { lacks: [`${station.name ?? 'The station'} is at no exhaust that is described.`] };
   const room = roomNamed(plan, exhaust.room);
-  if (!room)
-    return { verdict: 'cannot be judged', why: [`The room of ${exhaust.name ?? 'the exhaust'} is not described.`] };
-  const [all, alone] = [
-    roomQuestion(plan, room),
-    roomQuestion(
-      plan,
-      room,
-      (each) => each === exhaust,
-      (each) => each === station,
-    ),
-  ];
-  const needed = neededAirflow(station, need.velocity!.max);
-  const lacks = [...('lacks' in needed ? needed.lacks : []), ...alone.gaps];
-  if (!all.value || !alone.value || alone.value.exhausts.length === 0 || 'lacks' in needed)
-    return { verdict: 'cannot be judged', why: [...lacks, ...(all.value ? [] : all.gaps)] };
-  const [together, by] = [solveRoomBalance(all.value).result, solveRoomBalance(alone.value).result];
-  const name = alone.value.exhausts[0]!.name;
-  const delivered = shareOf(together, name, station);
+  if (!room) return { lacks: [`The room of ${exhaust.name ?? 'the exhaust'} is not described.`] };
+  const isIts = (each: PlanExhaust) => each === exhaust;
+  const [all, alone] = [roomQuestion(plan, room), roomQuestion(plan, room, isIts, (each) => each === station)];
+  const name = alone.value?.exhausts[0]?.name;
+  if (!all.value || !alone.value || name === undefined)
+    return { lacks: [...alone.gaps, ...(all.value ? [] : all.gaps)] };
+  const [together, by] = [everythingOn(plan, room, all.value), solveRoomBalance(alone.value).result];
   const leaves = together.exhausts.reduce((sum, { airflow }) => sum + Math.max(0, airflow), 0);
-  const measured: Measured = {
-    ...{ needed: needed.airflow, delivered, alone: shareOf(by, name, station), share: delivered / needed.airflow },
+  return {
+    ...{ delivered: shareOf(together, name, station), alone: shareOf(by, name, station) },
     roomPressure: together.roomPressure,
-    spills: together.appliances.filter(({ spills }) => spills).map(({ name }) => name),
+    spills: together.appliances.filter(({ spills }) => spills).map((appliance) => appliance.name),
     clearing:
       leaves > 0 ? timeUntil(CLEARED, cubicMetresPerSecond(leaves), cubicMetres(room.volume!), MIXING) : Infinity,
     assumptions: [...new Set([...all.assumptions, ...all.gaps])],
   };
-  return { verdict: measured.share >= 1 ? 'meets' : 'falls short', ...measured };
+}
+
+/**
+ * Whether a station of a workshop has the air that a pair needs: its own hood's need at the highest stated velocity, against what it is
+ * delivered. @param delivers what `deliver` gives, worked out once where many pairs are asked
+ * @returns prohibited stays prohibited; what is missing is told
+ */
+export function cope(plan: Plan, station: PlanStation, need: Need, delivers = () => deliver(plan, station)): Coped {
+  const before = stopped(station, need);
+  if (before) return before;
+  const needed = neededAirflow(station, need.velocity!.max);
+  const given = delivers();
+  if ('lacks' in needed || 'lacks' in given)
+    return { verdict: 'cannot be judged', why: [needed, given].flatMap((each) => ('lacks' in each ? each.lacks : [])) };
+  const share = given.delivered / needed.airflow;
+  return { verdict: share >= 1 ? 'meets' : 'falls short', ...given, needed: needed.airflow, share };
 }

@@ -7,8 +7,8 @@ import { fan } from '@/lib/worksheets/fan-schema';
 
 /** Limits on one workshop. */
 export const MAX_ROOMS = 8;
-export const MAX_EXHAUSTS = 16;
-export const MAX_STATIONS = 24;
+export const MAX_EXHAUSTS = 12;
+export const MAX_STATIONS = 16;
 export const MAX_MATERIALS = 24;
 export const MAX_READINGS = 120;
 

@@ -44,7 +44,9 @@ test('a prohibited pair stays prohibited in the table, and each cell opens to it
   await row.getByRole('button', { name: 'Prohibited' }).click();
   await expect(page.getByText('No airflow makes a prohibited pair acceptable.')).toBeVisible();
   await row.getByRole('button', { name: 'Falls short' }).first().click();
-  await expect(page.locator('[data-verdict="falls short"]')).toContainText('the flue of the water heater is beaten');
+  const opened = page.locator('[data-verdict="falls short"]');
+  await expect(opened).toContainText('the flue of the water heater is beaten');
+  await expect(opened).toContainText('What would change it most');
 });
 
 test('what is typed is kept as it stands, and a second tab does not overwrite it unseen', async ({ page, context }) => {
