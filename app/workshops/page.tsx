@@ -3,6 +3,9 @@ import { Caution } from '@/components/ui/caution';
 import { WorkshopBuilder } from '@/components/workshops/builder';
 import { libraryOffers } from '@/lib/search/library-offers';
 
+/** Rendered a request: a page stored by the build would lack the nonce of its policy, and its day would stand still. */
+export const dynamic = 'force-dynamic';
+
 export const metadata: Metadata = {
   title: 'My workshop',
   description: 'Describe rooms, exhausts and machines once, and see whether they cope with a material and a process.',
